@@ -1,0 +1,5 @@
+/** The outcome of something that may fail in an expected way; `error.code` comes from a closed union. */
+export type Result<T, E> = { ok: true; value: T } | { ok: false; error: E };
+
+export const ok = <T>(value: T): { ok: true; value: T } => ({ ok: true, value });
+export const err = <E>(error: E): { ok: false; error: E } => ({ ok: false, error });
