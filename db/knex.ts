@@ -1,0 +1,71 @@
+import knex, { type Knex } from 'knex';
+import type { Tenant } from '@/lib/access/actor';
+
+let shared: Knex | undefined;
+
+/** The application's connection pool (role `spinstead_app`), opened on first use. */
+export function database(): Knex {
+  if (!shared) {
+    const url = process.env.DATABASE_URL;
+    if (!url) throw new Error('DATABASE_URL is not set: give the connection of the role spinstead_app.');
+    shared = openDatabase(url);
+  }
+  return shared;
+}
+
+export function openDatabase(url: string, max = 10): Knex {
+  return knex({
+    client: 'pg',
+    connection: { connectionString: url, application_name: 'spinstead', statement_timeout: 30_000 },
+    pool: { min: 0, max },
+  });
+}
+
+export async function closeDatabase(): Promise<void> {
+  await shared?.destroy();
+  shared = undefined;
+}
+
+/** What the row-level policies look at, set for one transaction only. */
+interface Scope {
+  groupId?: string | null;
+  userId?: string | null;
+  tokenHash?: string | null;
+}
+
+async function scoped<T>(db: Knex, scope: Scope, work: (trx: Knex.Transaction) => Promise<T>): Promise<T> {
+  return db.transaction(async (trx) => {
+    await trx.raw(
+      `select set_config('app.group_id', ?, true), set_config('app.user_id', ?, true), set_config('app.token_hash', ?, true)`,
+      [scope.groupId ?? '', scope.userId ?? '', scope.tokenHash ?? ''],
+    );
+    return work(trx);
+  });
+}
+
+/** A transaction that sees and changes only the rows of the tenant's group. */
+export function asTenant<T>(
+  db: Knex,
+  tenant: Tenant,
+  work: (trx: Knex.Transaction) => Promise<T>,
+): Promise<T> {
+  return scoped(db, { groupId: tenant.groupId, userId: tenant.userId }, work);
+}
+
+/** A transaction of a person outside any group: their own account, sessions and memberships. */
+export function asPerson<T>(
+  db: Knex,
+  userId: string,
+  work: (trx: Knex.Transaction) => Promise<T>,
+): Promise<T> {
+  return scoped(db, { userId }, work);
+}
+
+/** A transaction that sees only the invitation whose token hashes to this value. */
+export function asTokenHolder<T>(
+  db: Knex,
+  tokenHash: string,
+  work: (trx: Knex.Transaction) => Promise<T>,
+): Promise<T> {
+  return scoped(db, { tokenHash }, work);
+}
