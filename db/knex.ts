@@ -1,7 +1,32 @@
 import knex, { type Knex } from 'knex';
+import pg from 'pg';
 import type { Tenant } from '@/lib/access/actor';
 
 let shared: Knex | undefined;
+
+// Counts and byte sizes stay far below 2^53, so a bigint column may arrive as a number.
+pg.types.setTypeParser(pg.types.builtins.INT8, Number);
+// A date has no time zone: keep the text instead of a Date at somebody's midnight.
+pg.types.setTypeParser(pg.types.builtins.DATE, (text) => text);
+
+const toSnake = (name: string) => name.replace(/[A-Z]/g, (letter) => `_${letter.toLowerCase()}`);
+const toCamel = (name: string) =>
+  name.replace(/_([a-z0-9])/g, (_match, letter: string) => letter.toUpperCase());
+
+/** Rows come back with the names the code uses: `group_id` → `groupId`. Values are left alone. */
+function camelKeys(row: unknown): unknown {
+  if (row === null || typeof row !== 'object' || Array.isArray(row) || row instanceof Date) return row;
+  return Object.fromEntries(Object.entries(row).map(([key, value]) => [toCamel(key), value]));
+}
+
+function camelResult(result: unknown): unknown {
+  if (Array.isArray(result)) return result.map(camelKeys);
+  if (result !== null && typeof result === 'object' && 'rows' in result && Array.isArray(result.rows)) {
+    result.rows = result.rows.map(camelKeys);
+    return result;
+  }
+  return camelKeys(result);
+}
 
 /** The application's connection pool (role `spinstead_app`), opened on first use. */
 export function database(): Knex {
@@ -18,6 +43,8 @@ export function openDatabase(url: string, max = 10): Knex {
     client: 'pg',
     connection: { connectionString: url, application_name: 'spinstead', statement_timeout: 30_000 },
     pool: { min: 0, max },
+    wrapIdentifier: (name, quote) => (name === '*' ? name : quote(toSnake(name))),
+    postProcessResponse: camelResult,
   });
 }
 
