@@ -1,0 +1,52 @@
+/**
+ * A printed number: "-382.30", "1.0D-01" (Fortran exponent), "  6.". Only the whole text counts.
+ * @returns null for stars (overflow), inf, nan, blanks and anything else that is no finite number
+ */
+export function readNumber(text: string | undefined): number | null {
+  if (text === undefined || text.length > 64) return null;
+  const trimmed = text.trim();
+  if (!/^[+-]?(?:\d+\.?\d*|\.\d+)(?:[eEdD][+-]?\d+)?$/.test(trimmed)) return null;
+  const value = Number(trimmed.replace(/[dD]/, 'e'));
+  return Number.isFinite(value) ? value : null;
+}
+
+/** A printed whole number, or null. */
+export function readInteger(text: string | undefined): number | null {
+  const trimmed = text?.trim();
+  return trimmed !== undefined && /^[+-]?\d{1,15}$/.test(trimmed) ? Number(trimmed) : null;
+}
+
+/** The text after the first occurrence of a mark ("=", ":", "...."), or undefined when there is none. */
+export function after(text: string, mark: string): string | undefined {
+  const at = text.indexOf(mark);
+  return at < 0 ? undefined : text.slice(at + mark.length);
+}
+
+/** The blank-separated words of a line. */
+export function words(text: string): string[] {
+  return text
+    .split(' ')
+    .flatMap((word) => word.split('\t'))
+    .filter((word) => word !== '');
+}
+
+/** The first number after a mark, where text may follow it: `numberAfter("E = -1.5 Eh", "=")` is −1.5. */
+export function numberAfter(text: string, mark: string): number | null {
+  const rest = after(text, mark);
+  return rest === undefined ? null : readNumber(words(rest)[0]);
+}
+
+/** The first whole number after a mark. */
+export function integerAfter(text: string, mark: string): number | null {
+  const rest = after(text, mark);
+  return rest === undefined ? null : readInteger(words(rest)[0]);
+}
+
+/**
+ * Numbers of a fixed-width row in which a value too wide leaves no blank before it ("-256.04273-255.9"):
+ * a minus sign that follows a digit starts a new number. Exponents ("1.0E-05") stay whole.
+ * @returns null in the places of stars and other text
+ */
+export function readNumbers(text: string): (number | null)[] {
+  return words(text.replace(/(\d)-(?=\d*\.)/g, '$1 -')).map((word) => readNumber(word));
+}

@@ -1,0 +1,83 @@
+/**
+ * How a program file is written.
+ *
+ *     export const example = defineProgram<ExampleState>({
+ *       name: 'NWChem',
+ *       marks: ['Example Package, version'],          // any of these lines says that the file is this program's
+ *       start: () => ({ steps: new StepList('NWChem'), … }),   // what is known so far; a fresh one per file
+ *       landmarks: { ...runLandmarks, ...energyLandmarks },    // text → what to do with that line
+ *       end: (state) => ({ steps, outcome, failure }),
+ *     });
+ *
+ * - The keys of `landmarks` are beginnings of lines (scanner.ts says how they are compared). The function gets
+ *   the line and the state; it reads what stands on the line itself, and may return a `Section` that takes the
+ *   lines below. A landmark closes whatever section is open; a section that was not closed by its own last line
+ *   has saved nothing, so a table cut short is absent instead of half read. `rowTable` (row-table.ts) writes
+ *   the usual section in one expression.
+ * - To mark a landmark as looked for inside echoed input, or as a closing line, give `{ read, always: true }` or
+ *   `{ read, evenUnended: true }` in place of the function.
+ * - The line that recognised the program is shown to its landmarks too.
+ * - Values go into the current step (`StepList.current`) by plain assignment, and `cite(step, 'spin.s2', line)`
+ *   (cite.ts) keeps the line as evidence. Numbers are read with numbers.ts: stars, `inf` and nonsense are null.
+ * - What is true for every program (formula, atom count, warnings on parity and spin sums, the top level) is done
+ *   after `end` by finish-step.ts and merge-steps.ts; a program file reports only what is printed.
+ *
+ * A fifth program is one such file (a folder with a file per section past 250 lines), one line in programs.ts,
+ * its name in record.ts, and its fixtures.
+ */
+import type { Landmark, Line, Section } from './landmark';
+import type { Failure, Outcome, Program, Step } from './record';
+
+/** What a program file knows at the end: every job in file order and how the file as a whole ended. */
+export interface ProgramResult {
+  steps: Step[];
+  outcome: Outcome;
+  failure: Failure | null;
+}
+
+export type LandmarkReader<State> = (line: Line, state: State) => Section | void;
+
+export interface LandmarkEntry<State> {
+  read: LandmarkReader<State>;
+  always?: boolean;
+  evenUnended?: boolean;
+}
+
+/** Beginning of a line → how that line is read. */
+export type LandmarkMap<State> = Record<string, LandmarkReader<State> | LandmarkEntry<State>>;
+
+/** A program being read: landmarks bound to the state of one file. */
+export interface ProgramReading {
+  landmarks: Landmark[];
+  end(): ProgramResult;
+}
+
+export interface ProgramDefinition {
+  name: Program;
+  marks: readonly string[];
+  open(): ProgramReading;
+}
+
+export function defineProgram<State>(definition: {
+  name: Program;
+  marks: readonly string[];
+  start: () => State;
+  landmarks: LandmarkMap<State>;
+  end: (state: State) => ProgramResult;
+}): ProgramDefinition {
+  const { name, marks, start, landmarks, end } = definition;
+  return {
+    name,
+    marks,
+    open() {
+      const state = start();
+      return {
+        landmarks: Object.entries(landmarks).map(([text, entry]) => {
+          const { read, ...options } = typeof entry === 'function' ? { read: entry } : entry;
+          return { text, ...options, read: (line) => read(line, state) };
+        }),
+        end: () => end(state),
+      };
+    },
+  };
+}

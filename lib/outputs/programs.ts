@@ -1,0 +1,4 @@
+import type { ProgramDefinition } from './program';
+
+/** Every program that is read. A further one is added here. */
+export const programs: readonly ProgramDefinition[] = [];

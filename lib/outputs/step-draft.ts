@@ -1,0 +1,92 @@
+import { cite } from './cite';
+import type { Line } from './landmark';
+import { emptyStep, type Geometry, type Program, type Step } from './record';
+import { warn } from './warnings';
+
+/** The values that belong to one geometry and one wavefunction; they change together or not at all. */
+export type Point = Pick<
+  Step,
+  | 'energyHartree'
+  | 'scf'
+  | 'spin'
+  | 'populations'
+  | 'orbitals'
+  | 'dipoleDebye'
+  | 'geometry'
+  | 'evidence'
+  | 'warnings'
+>;
+
+function emptyPoint(): Point {
+  const { energyHartree, scf, spin, populations, orbitals, dipoleDebye, geometry, evidence, warnings } =
+    emptyStep(null);
+  return { energyHartree, scf, spin, populations, orbitals, dipoleDebye, geometry, evidence, warnings };
+}
+
+/** Whether two geometries are the same as far as they are printed (1e-5 Å, same frame, same order). */
+export function isSameGeometry(a: Geometry, b: Geometry): boolean {
+  return (
+    a.elements.length === b.elements.length &&
+    a.elements.every((element, i) => element === b.elements[i]) &&
+    a.positionsAngstrom.every((position, i) =>
+      position.every((value, axis) => Math.abs(value - (b.positionsAngstrom[i]?.[axis] ?? Infinity)) < 1e-5),
+    )
+  );
+}
+
+/**
+ * A step while it is being read. What belongs to the job as a whole (charge, method, optimisation history,
+ * frequencies, timings) goes into `step`; what belongs to one geometry (energy, spin, populations, orbitals,
+ * dipole) into `point`. A new geometry opens a new point, so that tables of an earlier geometry never stand
+ * beside a later energy, and a last geometry that got no energy does not take the place of the one that has.
+ */
+export class StepDraft {
+  readonly step: Step;
+  point: Point = emptyPoint();
+  private settled: Point | null = null;
+
+  constructor(program: Program) {
+    this.step = emptyStep(program);
+  }
+
+  /** The last point with an energy, before the present one. */
+  get lastSettled(): Point | null {
+    return this.settled;
+  }
+
+  /** Opens a new point; the present one is kept as the result so far if it has an energy. */
+  nextPoint(): void {
+    if (this.point.energyHartree !== null) this.settled = this.point;
+    this.point = emptyPoint();
+  }
+
+  /**
+   * Takes a printed geometry. The same one printed again changes nothing; another one opens a new point,
+   * unless the present point has neither geometry nor energy yet.
+   */
+  setGeometry(geometry: Geometry, line: Line): void {
+    const { point } = this;
+    if (point.geometry && isSameGeometry(point.geometry, geometry)) return;
+    if (point.geometry || point.energyHartree !== null) this.nextPoint();
+    this.point.geometry = geometry;
+    cite(this.point, 'geometry', line);
+  }
+
+  /** The step with the values of its last point that has an energy (of the last one when none has). */
+  finish(): Step {
+    const { point, settled } = this;
+    const useSettled =
+      settled !== null &&
+      (point.energyHartree === null || (point.geometry === null && settled.geometry !== null));
+    const { evidence, warnings, ...values } = useSettled ? settled : point;
+    const step: Step = {
+      ...this.step,
+      ...values,
+      evidence: { ...this.step.evidence, ...evidence },
+      warnings: [...this.step.warnings, ...warnings],
+    };
+    if (useSettled && point.geometry !== null)
+      warn(step, 'geometry-without-energy', point.evidence.geometry?.line);
+    return step;
+  }
+}
