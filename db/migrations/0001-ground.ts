@@ -142,7 +142,7 @@ export async function up(knex: Knex): Promise<void> {
       state text not null check (state in ('queued', 'reading', 'read', 'failed', 'refused')),
       known boolean not null default false,
       problem jsonb,
-      lines_read bigint not null default 0,
+      bytes_read bigint not null default 0,
       attempts integer not null default 0,
       created_at timestamptz not null default now(),
       changed_at timestamptz not null default now(),

@@ -1,5 +1,7 @@
 import type { Knex } from 'knex';
 import type { Tenant } from '@/lib/access/actor';
+import type { ReceivedFile } from '@/lib/storage/receive-files';
+import { ensureFile } from './files';
 
 export type UploadState = 'queued' | 'reading' | 'read' | 'failed' | 'refused';
 export type UploadKind = 'program output' | 'xyz' | 'csv';
@@ -23,7 +25,7 @@ export interface Upload {
   state: UploadState;
   known: boolean;
   problem: UploadProblem | null;
-  linesRead: number;
+  bytesRead: number;
   attempts: number;
   createdAt: Date;
   changedAt: Date;
@@ -40,7 +42,7 @@ const columns = [
   'state',
   'known',
   'problem',
-  'linesRead',
+  'bytesRead',
   'attempts',
   'createdAt',
   'changedAt',
@@ -125,26 +127,32 @@ export async function startReading(
   return row;
 }
 
-export async function setLinesRead(
+export async function setBytesRead(
   trx: Knex.Transaction,
   tenant: Tenant,
   id: string,
-  linesRead: number,
+  bytesRead: number,
 ): Promise<void> {
   await trx('uploads')
     .where({ groupId: tenant.groupId, id, state: 'reading' })
-    .update({ linesRead, changedAt: trx.fn.now() });
+    .update({ bytesRead, changedAt: trx.fn.now() });
 }
 
+/** `finding` is what the file says of itself that a person should know: cut off, failed, not converged. */
 export async function finishReading(
   trx: Knex.Transaction,
   tenant: Tenant,
   id: string,
-  linesRead: number,
+  finding: UploadProblem | null,
 ): Promise<void> {
   await trx('uploads')
     .where({ groupId: tenant.groupId, id })
-    .update({ state: 'read', problem: null, linesRead, changedAt: trx.fn.now() });
+    .update({
+      state: 'read',
+      problem: finding === null ? null : JSON.stringify(finding),
+      bytesRead: trx.ref('bytes'),
+      changedAt: trx.fn.now(),
+    });
 }
 
 export async function failReading(
@@ -166,7 +174,7 @@ export async function requeueUpload(
 ): Promise<Upload | undefined> {
   const [row] = await trx('uploads')
     .where({ groupId: tenant.groupId, id, state: 'failed' })
-    .update({ state: 'queued', problem: null, linesRead: 0, changedAt: trx.fn.now() })
+    .update({ state: 'queued', problem: null, bytesRead: 0, changedAt: trx.fn.now() })
     .returning<Upload[]>(columns);
   return row;
 }
@@ -181,4 +189,21 @@ export async function listWaitingUploads(
     [unchangedSeconds],
   );
   return result.rows;
+}
+
+/** Notes one received file of a drop: its bytes once per group, and the upload, queued or refused. */
+export async function insertReceivedFile(
+  trx: Knex.Transaction,
+  tenant: Tenant,
+  drop: { studyId: string; dropId: string },
+  received: ReceivedFile,
+): Promise<Upload> {
+  const { fileName } = received;
+  if ('refused' in received) {
+    const refused = { sha256: null, bytes: 0, kind: null, state: 'refused' as const, known: false };
+    return insertUpload(trx, tenant, { ...drop, fileName, ...refused, problem: received.refused });
+  }
+  const { sha256, bytes, kind } = received;
+  const { known } = await ensureFile(trx, tenant, { sha256, bytes });
+  return insertUpload(trx, tenant, { ...drop, fileName, sha256, bytes, kind, state: 'queued', known, problem: null });
 }
