@@ -20,6 +20,8 @@ export interface Landmark {
   read(line: Line): Section | void;
   /** Is looked for inside exclusive sections too (program banners). */
   always?: boolean;
+  /** Is looked for only while no section is open (rules and other lines that tables contain too). */
+  onlyOutside?: boolean;
   /** Is read from a last line without newline too. */
   evenUnended?: boolean;
 }

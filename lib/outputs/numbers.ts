@@ -7,7 +7,7 @@ export function readNumber(text: string | undefined): number | null {
   const trimmed = text.trim();
   if (!/^[+-]?(?:\d+\.?\d*|\.\d+)(?:[eEdD][+-]?\d+)?$/.test(trimmed)) return null;
   const value = Number(trimmed.replace(/[dD]/, 'e'));
-  return Number.isFinite(value) ? value : null;
+  return Number.isFinite(value) ? value + 0 : null; // -0 is printed for small negative values; it is 0
 }
 
 /** A printed whole number, or null. */

@@ -14,8 +14,9 @@
  *   lines below. A landmark closes whatever section is open; a section that was not closed by its own last line
  *   has saved nothing, so a table cut short is absent instead of half read. `rowTable` (row-table.ts) writes
  *   the usual section in one expression.
- * - To mark a landmark as looked for inside echoed input, or as a closing line, give `{ read, always: true }` or
- *   `{ read, evenUnended: true }` in place of the function.
+ * - In place of the function, `{ read, always: true }` marks a landmark that is looked for inside echoed input
+ *   too, `{ read, onlyOutside: true }` one that must not break off a table, `{ read, evenUnended: true }` a closing
+ *   line.
  * - The line that recognised the program is shown to its landmarks too.
  * - Values go into the current step (`StepList.current`) by plain assignment, and `cite(step, 'spin.s2', line)`
  *   (cite.ts) keeps the line as evidence. Numbers are read with numbers.ts: stars, `inf` and nonsense are null.
@@ -33,6 +34,8 @@ export interface ProgramResult {
   steps: Step[];
   outcome: Outcome;
   failure: Failure | null;
+  /** Timings of the whole file where they are printed apart from those of the steps, with their evidence. */
+  whole?: Pick<Step, 'resources' | 'evidence'>;
 }
 
 export type LandmarkReader<State> = (line: Line, state: State) => Section | void;
@@ -40,6 +43,7 @@ export type LandmarkReader<State> = (line: Line, state: State) => Section | void
 export interface LandmarkEntry<State> {
   read: LandmarkReader<State>;
   always?: boolean;
+  onlyOutside?: boolean;
   evenUnended?: boolean;
 }
 

@@ -1,4 +1,5 @@
+import { nwchem } from './nwchem/nwchem';
 import type { ProgramDefinition } from './program';
 
 /** Every program that is read. A further one is added here. */
-export const programs: readonly ProgramDefinition[] = [];
+export const programs: readonly ProgramDefinition[] = [nwchem];

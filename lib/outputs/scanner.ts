@@ -153,9 +153,11 @@ export class LineScanner {
     if (to - from > MAX_LINE_BYTES) return;
     const begin = this.lines === 1 && startsWithByteOrderMark(buffer) ? from + 3 : from;
     const stop = to > begin && buffer[to - 1] === RETURN ? to - 1 : to;
-    const found = this.table.find(buffer, begin, stop);
+    const landmark = this.table.find(buffer, begin, stop);
+    const shut = section !== null && (landmark?.onlyOutside || (section.exclusive && !landmark?.always));
+    const found = shut || (unended && !landmark?.evenUnended) ? undefined : landmark;
     const line = () => ({ text: decode(buffer.subarray(begin, stop)), number: this.lines });
-    if (found && (!section?.exclusive || found.always) && (!unended || found.evenUnended)) {
+    if (found) {
       this.section = found.read(line()) ?? null;
     } else if (section && !unended && !section.take(line())) this.section = null;
   }

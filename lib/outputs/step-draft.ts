@@ -54,9 +54,13 @@ export class StepDraft {
     return this.settled;
   }
 
-  /** Opens a new point; the present one is kept as the result so far if it has an energy. */
+  /**
+   * Opens a new point; the present one is kept as the result so far if it has an energy, and a geometry
+   * (unless no point had one yet).
+   */
   nextPoint(): void {
-    if (this.point.energyHartree !== null) this.settled = this.point;
+    const { point, settled } = this;
+    if (point.energyHartree !== null && (point.geometry !== null || !settled?.geometry)) this.settled = point;
     this.point = emptyPoint();
   }
 
