@@ -1,4 +1,3 @@
-import { HARTREE_EV } from '../chemistry/constants';
 import { cite } from './cite';
 import type { Line } from './landmark';
 import type { Evidence, Step } from './record';
@@ -7,28 +6,42 @@ type Frontier = NonNullable<Step['orbitals']>['alpha'];
 
 /** Collects the highest occupied and the lowest empty orbital of one spin while a list goes by. */
 export class FrontierOrbitals {
-  private homo: { ev: number; line: Line } | null = null;
-  private lumo: { ev: number; line: Line } | null = null;
+  private homo = -Infinity;
+  private lumo = Infinity;
+  private homoLine: Line | null = null;
+  private lumoLine: Line | null = null;
 
-  add(energyEv: number, occupied: boolean, line: Line): void {
+  /** The energy in any one unit. */
+  add(energy: number, occupied: boolean, line: Line): void {
     if (occupied) {
-      if (this.homo === null || energyEv > this.homo.ev) this.homo = { ev: energyEv, line };
-    } else if (this.lumo === null || energyEv < this.lumo.ev) this.lumo = { ev: energyEv, line };
+      if (energy <= this.homo && this.homoLine) return;
+      this.homo = energy;
+      this.homoLine = line;
+    } else if (energy < this.lumo) {
+      this.lumo = energy;
+      this.lumoLine = line;
+    }
   }
 
   get isEmpty(): boolean {
-    return this.homo === null && this.lumo === null;
+    return this.homoLine === null && this.lumoLine === null;
   }
 
-  /** The two energies, eV, with their lines kept as evidence under `orbitals.<spin>`. */
-  read(holder: { evidence: Evidence }, spin: 'alpha' | 'beta'): Frontier {
-    if (this.homo) cite(holder, `orbitals.${spin}.homoEv`, this.homo.line);
-    if (this.lumo) cite(holder, `orbitals.${spin}.lumoEv`, this.lumo.line);
-    return { homoEv: this.homo?.ev ?? null, lumoEv: this.lumo?.ev ?? null };
+  get hasEmpty(): boolean {
+    return this.lumoLine !== null;
   }
-}
 
-/** Hartree to eV with no more digits than a printed orbital energy carries. */
-export function toOrbitalEv(energyHartree: number): number {
-  return Number((energyHartree * HARTREE_EV).toFixed(6));
+  /**
+   * The two energies, eV, with their lines kept as evidence under `orbitals.<spin>`.
+   * @param factor - eV in the unit of the energies; six decimals are kept where they are converted
+   */
+  read(holder: { evidence: Evidence }, spin: 'alpha' | 'beta', factor = 1): Frontier {
+    const toEv = (energy: number) => (factor === 1 ? energy : Number((energy * factor).toFixed(6)));
+    if (this.homoLine) cite(holder, `orbitals.${spin}.homoEv`, this.homoLine);
+    if (this.lumoLine) cite(holder, `orbitals.${spin}.lumoEv`, this.lumoLine);
+    return {
+      homoEv: this.homoLine ? toEv(this.homo) : null,
+      lumoEv: this.lumoLine ? toEv(this.lumo) : null,
+    };
+  }
 }

@@ -50,7 +50,9 @@ export class LandmarkTable {
     if (at >= to) return undefined;
     const second = at + 1 < to ? (bytes[at + 1] as number) : NEWLINE;
     const candidates = this.byStart.get((bytes[at] as number) * 256 + second);
-    return candidates?.find(({ pattern }) => startsWith(bytes, at, to, pattern))?.landmark;
+    if (!candidates) return undefined;
+    for (const { pattern, landmark } of candidates) if (startsWith(bytes, at, to, pattern)) return landmark;
+    return undefined;
   }
 }
 

@@ -16,7 +16,7 @@
  *   the usual section in one expression.
  * - In place of the function, `{ read, always: true }` marks a landmark that is looked for inside echoed input
  *   too, `{ read, onlyOutside: true }` one that must not break off a table, `{ read, evenUnended: true }` a closing
- *   line.
+ *   line; `glance` looks at the bytes first, for rows by the hundred thousand (nwchem/orbitals.ts).
  * - The line that recognised the program is shown to its landmarks too.
  * - Values go into the current step (`StepList.current`) by plain assignment, and `cite(step, 'spin.s2', line)`
  *   (cite.ts) keeps the line as evidence. Numbers are read with numbers.ts: stars, `inf` and nonsense are null.
@@ -42,6 +42,7 @@ export type LandmarkReader<State> = (line: Line, state: State) => Section | void
 
 export interface LandmarkEntry<State> {
   read: LandmarkReader<State>;
+  glance?: (bytes: Uint8Array, from: number, to: number, lineNumber: number, state: State) => boolean;
   always?: boolean;
   onlyOutside?: boolean;
   evenUnended?: boolean;
@@ -77,8 +78,11 @@ export function defineProgram<State>(definition: {
       const state = start();
       return {
         landmarks: Object.entries(landmarks).map(([text, entry]) => {
-          const { read, ...options } = typeof entry === 'function' ? { read: entry } : entry;
-          return { text, ...options, read: (line) => read(line, state) };
+          const { read, glance, ...options } = typeof entry === 'function' ? { read: entry } : entry;
+          const landmark: Landmark = { text, ...options, read: (line) => read(line, state) };
+          if (glance)
+            landmark.glance = (bytes, from, to, lineNumber) => glance(bytes, from, to, lineNumber, state);
+          return landmark;
         }),
         end: () => end(state),
       };

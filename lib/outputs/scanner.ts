@@ -156,10 +156,11 @@ export class LineScanner {
     const landmark = this.table.find(buffer, begin, stop);
     const shut = section !== null && (landmark?.onlyOutside || (section.exclusive && !landmark?.always));
     const found = shut || (unended && !landmark?.evenUnended) ? undefined : landmark;
-    const line = () => ({ text: decode(buffer.subarray(begin, stop)), number: this.lines });
-    if (found) {
-      this.section = found.read(line()) ?? null;
-    } else if (section && !unended && !section.take(line())) this.section = null;
+    if (!found && (section === null || unended)) return;
+    if (found?.glance && !found.glance(buffer, begin, stop, this.lines)) return;
+    const line = { text: decode(buffer, begin, stop), number: this.lines };
+    if (found) this.section = found.read(line) ?? null;
+    else if (section && !section.take(line)) this.section = null;
   }
 }
 
@@ -200,16 +201,16 @@ function startsWithByteOrderMark(bytes: Uint8Array): boolean {
 const utf8 = new TextDecoder('utf-8', { ignoreBOM: true });
 const latin1 = new TextDecoder('latin1');
 
-function decode(bytes: Uint8Array): string {
+function decode(bytes: Uint8Array, from: number, to: number): string {
   // A plain line is some times quicker this way than through a TextDecoder.
-  if (isShortAscii(bytes)) return String.fromCharCode.apply(null, bytes as Uint8Array & number[]);
-  const text = utf8.decode(bytes);
-  return text.includes('\uFFFD') ? latin1.decode(bytes) : text;
+  if (to - from <= 256 && isAscii(bytes, from, to))
+    return String.fromCharCode.apply(null, bytes.subarray(from, to) as Uint8Array & number[]);
+  const text = utf8.decode(bytes.subarray(from, to));
+  return text.includes('\uFFFD') ? latin1.decode(bytes.subarray(from, to)) : text;
 }
 
-function isShortAscii(bytes: Uint8Array): boolean {
-  if (bytes.length > 256) return false;
+function isAscii(bytes: Uint8Array, from: number, to: number): boolean {
   let all = 0;
-  for (let i = 0; i < bytes.length; i++) all |= bytes[i] as number;
+  for (let i = from; i < to; i++) all |= bytes[i] as number;
   return all < 0x80;
 }

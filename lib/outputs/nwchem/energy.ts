@@ -4,6 +4,7 @@ import { numberAfter, readInteger, readNumber, words } from '../numbers';
 import type { LandmarkMap } from '../program';
 import { warn } from '../warnings';
 import { geometryOfEnergy } from './geometry';
+import { saveOrbitals } from './orbitals';
 import { openStep, type NwchemState } from './state';
 
 function placeGeometry(state: NwchemState): void {
@@ -27,6 +28,7 @@ function readEnergy(line: Line, state: NwchemState): void {
     }
     return;
   }
+  saveOrbitals(state, false);
   draft.nextPoint();
   const { point } = draft;
   point.energyHartree = energy;

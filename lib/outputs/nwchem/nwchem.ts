@@ -9,6 +9,7 @@ import { energyLandmarks, startScf } from './energy';
 import { closeOpenStep, failureLandmarks } from './failures';
 import { geometryLandmarks } from './geometry';
 import { populationLandmarks } from './populations';
+import { orbitalLandmarks, saveOrbitals } from './orbitals';
 import { propertyLandmarks, saveFrequencies } from './properties';
 import { settingsLandmarks } from './settings';
 import { addTask, openStep, startNwchem, type NwchemState } from './state';
@@ -19,6 +20,7 @@ function closeStep(state: NwchemState): void {
   if (!current) return;
   saveFrequencies(state);
   const { step, point } = current;
+  saveOrbitals(state, step.outcome === 'cut off');
   const take = <Value>(known: { line: Line } | null, path: string, value: Value): Value | null => {
     if (known) cite(step, path, known.line);
     return known ? value : null;
@@ -151,6 +153,7 @@ export const nwchem = defineProgram<NwchemState>({
     ...geometryLandmarks,
     ...energyLandmarks,
     ...populationLandmarks,
+    ...orbitalLandmarks,
     ...propertyLandmarks,
     ...failureLandmarks,
   },

@@ -1,36 +1,11 @@
 import { DEBYE_PER_AU } from '../../chemistry/constants';
 import { cite } from '../cite';
-import { FrontierOrbitals, toOrbitalEv } from '../frontier';
 import type { Line, Section } from '../landmark';
 import { numberAfter, readNumber, readNumbers, words } from '../numbers';
 import type { LandmarkMap } from '../program';
 import { vibrationsOf } from '../vibrations';
 import { warn } from '../warnings';
 import type { NwchemState } from './state';
-
-function openOrbitals(spin: 'alpha' | 'beta') {
-  return (_: Line, state: NwchemState) => {
-    state.orbitalSpin = spin;
-    if (spin === 'alpha') state.orbitals = { alpha: new FrontierOrbitals(), beta: null };
-    else if (state.orbitals) state.orbitals.beta = new FrontierOrbitals();
-  };
-}
-
-// Vector   26  Occ=1.000000D+00  E=-1.672071D-01
-// Vector   26  Occ=0.000000D+00  E= 1.667757D+00  Symmetry=a1
-function readVector(line: Line, state: NwchemState): void {
-  const { orbitals, orbitalSpin, current } = state;
-  if (!orbitals || !orbitalSpin || !current) return;
-  const occupation = numberAfter(line.text, 'Occ=');
-  const energy = numberAfter(line.text, ' E=');
-  if (occupation === null || energy === null) return;
-  orbitals[orbitalSpin]?.add(toOrbitalEv(energy), occupation > 0.5, line);
-  const { point } = current;
-  point.orbitals = {
-    alpha: orbitals.alpha.read(point, 'alpha'),
-    beta: orbitals.beta?.read(point, 'beta') ?? null,
-  };
-}
 
 /**
  * The first moments in the multipole table, atomic units, as a length in debye.
@@ -88,14 +63,6 @@ function thermochemistry(state: NwchemState) {
 }
 
 export const propertyLandmarks: LandmarkMap<NwchemState> = {
-  'DFT Final Molecular Orbital Analysis': openOrbitals('alpha'),
-  'DFT Final Alpha Molecular Orbital Analysis': openOrbitals('alpha'),
-  'DFT Final Beta Molecular Orbital Analysis': openOrbitals('beta'),
-  'ROHF Final Molecular Orbital Analysis': openOrbitals('alpha'),
-  'RHF Final Molecular Orbital Analysis': openOrbitals('alpha'),
-  'UHF Final Alpha Molecular Orbital Analysis': openOrbitals('alpha'),
-  'UHF Final Beta Molecular Orbital Analysis': openOrbitals('beta'),
-  Vector: readVector,
   'Multipole analysis of the density': readMultipoles,
   //  P.Frequency       49.01       81.56      151.70
   'P.Frequency': (line, state) => {

@@ -1,7 +1,7 @@
-import type { FrontierOrbitals } from '../frontier';
 import type { Line } from '../landmark';
 import type { Failure, Geometry, Step, Task } from '../record';
 import { StepDraft } from '../step-draft';
+import type { OrbitalList } from './orbitals';
 
 /** A geometry as printed, with the nuclear repulsion energy that tells which energy belongs to it. */
 export interface PrintedGeometry {
@@ -35,7 +35,7 @@ export interface NwchemState {
   /** Between the report of an optimisation step and the next printed geometry. */
   trial: boolean;
   orbitalSpin: 'alpha' | 'beta' | null;
-  orbitals: { alpha: FrontierOrbitals; beta: FrontierOrbitals | null } | null;
+  orbitals: { alpha: OrbitalList; beta: OrbitalList | null } | null;
   modesCm1: (number | null)[];
   modesLine: Line | null;
   steps: Step[];

@@ -77,7 +77,8 @@ export const settingsLandmarks: LandmarkMap<OrcaState> = {
   // Your calculation utilizes the basis: def2-SVP
   'Your calculation utilizes the basis:': (line, state) => {
     const value = after(line.text, 'basis:')?.trim() ?? '';
-    if (value !== '') state.bases.push({ value, line });
+    // After a compound job's last step the main job's basis is announced once more.
+    if (value !== '' && !state.current) state.bases.push({ value, line });
   },
   'Total Charge Charge ....': readSettingValue('charge'),
   'Multiplicity Mult ....': readSettingValue('multiplicity'),
