@@ -56,6 +56,11 @@ export function integerAfter(text: string, mark: string): number | null {
   return rest === undefined ? null : readInteger(firstWord(rest));
 }
 
+/** The whole number that is all that stands after a mark, as in "Charge    ....   -1". */
+export function soleIntegerAfter(text: string, mark: string): number | null {
+  return readInteger(after(text, mark));
+}
+
 /**
  * Numbers of a fixed-width row in which a value too wide leaves no blank before it ("-256.04273-255.9"):
  * a minus sign that follows a digit starts a new number. Exponents ("1.0E-05") stay whole.

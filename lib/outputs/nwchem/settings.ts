@@ -1,6 +1,6 @@
 import { cite } from '../cite';
 import type { Line, Section } from '../landmark';
-import { after, integerAfter, numberAfter, readInteger, words } from '../numbers';
+import { after, soleIntegerAfter, numberAfter, readInteger, words } from '../numbers';
 import type { LandmarkMap } from '../program';
 import type { Method, Step } from '../record';
 import { rowTable } from '../row-table';
@@ -9,7 +9,7 @@ import { openStep, type NwchemState } from './state';
 
 function readCount(path: 'charge' | 'electronCount' | 'atomCount', mark = ':') {
   return (line: Line, state: NwchemState) => {
-    const value = integerAfter(line.text, mark);
+    const value = soleIntegerAfter(line.text, mark);
     const { step } = openStep(state);
     if (value === null) return;
     step[path] = value;
@@ -93,7 +93,7 @@ function readBasis(heading: Line, state: NwchemState): Section {
 }
 
 function readMultiplicity(line: Line, state: NwchemState): void {
-  const value = integerAfter(line.text, ':');
+  const value = soleIntegerAfter(line.text, ':');
   const { step } = openStep(state);
   if (value === null || value === 0) return;
   step.multiplicity = Math.abs(value);
@@ -138,14 +138,14 @@ export const settingsLandmarks: LandmarkMap<NwchemState> = {
   },
   // Restricted open-shell prints the open shells, unrestricted the electrons of each spin.
   'open shells =': (line, state) => {
-    const open = integerAfter(line.text, '=');
+    const open = soleIntegerAfter(line.text, '=');
     if (open !== null) setMultiplicity(openStep(state).step, open + 1, line);
   },
   'alpha electrons =': (line, state) => {
-    state.alphaElectrons = integerAfter(line.text, '=');
+    state.alphaElectrons = soleIntegerAfter(line.text, '=');
   },
   'beta electrons =': (line, state) => {
-    const beta = integerAfter(line.text, '=');
+    const beta = soleIntegerAfter(line.text, '=');
     if (beta !== null && state.alphaElectrons !== null)
       setMultiplicity(openStep(state).step, Math.abs(state.alphaElectrons - beta) + 1, line);
   },

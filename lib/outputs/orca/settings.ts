@@ -1,6 +1,6 @@
 import { cite } from '../cite';
 import type { Line } from '../landmark';
-import { after, integerAfter, readInteger, words } from '../numbers';
+import { after, soleIntegerAfter, readInteger, words } from '../numbers';
 import type { LandmarkMap } from '../program';
 import type { Method } from '../record';
 import { warn } from '../warnings';
@@ -64,7 +64,7 @@ const references: Record<string, Method['reference']> = {
 /** "… Charge          ....    4": the value stands behind four dots. */
 function readSettingValue(path: 'charge' | 'multiplicity' | 'electronCount') {
   return (line: Line, state: OrcaState) => {
-    const value = integerAfter(line.text, '....');
+    const value = soleIntegerAfter(line.text, '....');
     const { step } = openStep(state);
     if (value === null || (path === 'multiplicity' && value < 1)) return;
     step[path] = value;
