@@ -6,8 +6,12 @@ import { warn } from './warnings';
 /** Largest difference between the sum of spin populations and 2S that rounding explains, per atom. */
 const SPIN_SUM_PER_ATOM = 0.006;
 
-/** Completes a step by what follows from its values and warns of those that contradict one another. */
+/**
+ * Completes a step by what follows from its values and warns of those that contradict one another.
+ * Doing it twice changes nothing.
+ */
 export function finishStep(step: Step): Step {
+  if (step.warnings.some(({ code }) => code === 'steps-abridged')) return step;
   const { geometry } = step;
   if (geometry) {
     step.formula = hillFormula(geometry.elements);

@@ -4,7 +4,7 @@
  *     export const example = defineProgram<ExampleState>({
  *       name: 'NWChem',
  *       marks: ['Example Package, version'],          // any of these lines says that the file is this program's
- *       start: () => ({ steps: new StepList('NWChem'), … }),   // what is known so far; a fresh one per file
+ *       start: () => ({ steps: [], current: null, … }),         // what is known so far; a fresh one per file
  *       landmarks: { ...runLandmarks, ...energyLandmarks },    // text → what to do with that line
  *       end: (state) => ({ steps, outcome, failure }),
  *     });
@@ -18,10 +18,11 @@
  *   too, `{ read, onlyOutside: true }` one that must not break off a table, `{ read, evenUnended: true }` a closing
  *   line; `glance` looks at the bytes first, for rows by the hundred thousand (nwchem/orbitals.ts).
  * - The line that recognised the program is shown to its landmarks too.
- * - Values go into the current step (`StepList.current`) by plain assignment, and `cite(step, 'spin.s2', line)`
- *   (cite.ts) keeps the line as evidence. Numbers are read with numbers.ts: stars, `inf` and nonsense are null.
+ * - A job is a `StepDraft` (step-draft.ts): values of the job go into its `step`, those of one geometry into its
+ *   `point`, by plain assignment, and `cite(holder, 'spin.s2', line)` (cite.ts) keeps the line as evidence. When
+ *   the job is over, `addStep(steps, draft.finish())` (step-list.ts). Numbers are read with numbers.ts: stars, `inf` and nonsense are null.
  * - What is true for every program (formula, atom count, warnings on parity and spin sums, the top level) is done
- *   after `end` by finish-step.ts and merge-steps.ts; a program file reports only what is printed.
+ *   by finish-step.ts and merge-steps.ts; a program file reports only what is printed.
  *
  * A fifth program is one such file (a folder with a file per section past 250 lines), one line in programs.ts,
  * its name in record.ts, and its fixtures.

@@ -9,7 +9,7 @@ import { LandmarkTable } from './landmark-table';
  * line moves to the buffer's beginning; a line longer than MAX_LINE_BYTES holds no landmark of any program
  * and is counted but never looked at. The caller may reuse a piece's memory as soon as `push` returns.
  *
- * How landmarks are compared: leading blanks of the line are skipped; one blank in the landmark stands for
+ * How landmarks are compared: leading blanks (and tabs) of the line are skipped; one blank in the landmark stands for
  * one or more blanks in the line; everything else byte by byte; the longest landmark that fits wins.
  * A landmark therefore is the beginning of a line, never something in its middle.
  *

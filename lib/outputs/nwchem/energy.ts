@@ -39,7 +39,8 @@ function readEnergy(line: Line, state: NwchemState): void {
   if (state.scfFailed) {
     point.scf = { converged: false, iterations: state.iterations };
     cite(point, 'scf.converged', state.scfFailed);
-  } else if (state.iterations === null) {
+  } else if (state.iterations === null && !state.alreadyConverged && !line.text.includes('SCF')) {
+    // Iterations of the SCF module are not read; it prints no energy without them.
     warn(
       point,
       'scf-skipped',
@@ -108,6 +109,9 @@ export const energyLandmarks: LandmarkMap<NwchemState> = {
     if (!current || !state.afterEnergy || repulsionHartree !== null) return;
     state.repulsionHartree = numberAfter(line.text, '=');
     placeGeometry(state);
+  },
+  'The DFT is already converged': (_, state) => {
+    state.alreadyConverged = true;
   },
   'd=': readIteration,
   'Calculation failed to converge': (line, state) => {

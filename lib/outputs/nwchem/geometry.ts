@@ -1,10 +1,10 @@
 import { BOHR_ANGSTROM } from '../../chemistry/constants';
-import { elementSymbols } from '../../chemistry/elements';
 import type { Line } from '../landmark';
 import { numberAfter, readInteger, readNumbers, words } from '../numbers';
 import type { LandmarkMap } from '../program';
 import { rowTable } from '../row-table';
 import { cite } from '../cite';
+import { elementOfTag } from '../element-of-tag';
 import { warn } from '../warnings';
 import type { NwchemState, PrintedGeometry } from './state';
 
@@ -23,11 +23,10 @@ function readRow(line: Line, factor: number): Row | null {
   const [charge, x, y, z, ...more] = readNumbers(rest.join(' '));
   if (charge === undefined || z === undefined || more.length > 0) return null;
   const isAtom = !/^(?:bq|x$)/i.test(tag) && charge !== null && Number.isInteger(charge);
-  const symbol = isAtom ? (elementSymbols[charge] ?? '') : '';
   const whole = typeof x === 'number' && typeof y === 'number' && typeof z === 'number';
   return {
     index,
-    element: symbol === '' ? null : symbol,
+    element: isAtom ? elementOfTag(tag, charge) : null,
     position: whole ? [x * factor, y * factor, z * factor] : null,
   };
 }

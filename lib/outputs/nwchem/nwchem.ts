@@ -3,6 +3,7 @@ import type { Line } from '../landmark';
 import { integerAfter, readNumber } from '../numbers';
 import { defineProgram, type LandmarkMap, type ProgramResult } from '../program';
 import type { Task } from '../record';
+import { addStep } from '../step-list';
 import { warn } from '../warnings';
 import { deckLandmarks } from './deck';
 import { energyLandmarks, startScf } from './energy';
@@ -41,7 +42,7 @@ function closeStep(state: NwchemState): void {
     point.scf = { converged: false, iterations: state.iterations };
     cite(point, 'scf.converged', state.iterationLine);
   }
-  state.steps.push(current.finish());
+  addStep(state.steps, current.finish());
   state.current = null;
 }
 

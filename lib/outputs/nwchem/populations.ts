@@ -1,4 +1,4 @@
-import { elementSymbol, elementSymbols } from '../../chemistry/elements';
+import { elementOfTag } from '../element-of-tag';
 import type { Line, Section } from '../landmark';
 import { readInteger, readNumber, words } from '../numbers';
 import { addSpins, setPopulation } from '../population';
@@ -23,11 +23,7 @@ function readRow(line: Line): Row | null {
   const index = readInteger(first);
   const nuclearCharge = readInteger(charge);
   if (index === null || nuclearCharge === null || value === undefined) return null;
-  // Tags are an element's symbol with anything behind it (fe, zn1, Cl_a).
-  const letters = /^[A-Za-z]{1,2}/.exec(tag)?.[0] ?? '';
-  const byTag = elementSymbol(letters) ?? elementSymbol(letters.slice(0, 1));
-  const byCharge = elementSymbols[nuclearCharge];
-  const element = byCharge && byCharge[0] === byTag?.[0] ? byCharge : byTag;
+  const element = elementOfTag(tag, nuclearCharge);
   return element ? { index, element, nuclearCharge, value, line } : null;
 }
 

@@ -28,6 +28,7 @@ export interface NwchemState {
   /** Since the last SCF started: its iterations, whether it failed, whether its energy has come. */
   iterations: number | null;
   iterationLine: Line | null;
+  alreadyConverged: boolean;
   scfFailed: Line | null;
   afterEnergy: boolean;
   repulsionHartree: number | null;
@@ -63,6 +64,7 @@ export function startNwchem(): NwchemState {
     latest: null,
     iterations: null,
     iterationLine: null,
+    alreadyConverged: false,
     scfFailed: null,
     afterEnergy: false,
     repulsionHartree: null,
@@ -89,6 +91,7 @@ export function openStep(state: NwchemState): StepDraft {
   state.current = draft;
   state.iterations = null;
   state.iterationLine = null;
+  state.alreadyConverged = false;
   state.scfFailed = null;
   state.afterEnergy = false;
   state.trial = false;

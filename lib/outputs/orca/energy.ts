@@ -150,6 +150,7 @@ export const energyLandmarks: LandmarkMap<OrcaState> = {
   },
   '*** THE OPTIMIZATION HAS CONVERGED': setOptimisation(true),
   'The optimization did not converge but reached': setOptimisation(false),
+  '* Energy+Gradient Calculation *': (_, state) => addTask(state, 'gradient'),
   'ORCA NUMERICAL FREQUENCIES': (_, state) => addTask(state, 'frequencies'),
   '<< Calculating gradient on displaced geometry': (_, state) => {
     state.displaced = true;
@@ -160,7 +161,10 @@ export const energyLandmarks: LandmarkMap<OrcaState> = {
   'E(CCSD)': after('coupled cluster'),
   'ORCA-MATRIX DRIVEN CI': after('coupled cluster'),
   'MP2 TOTAL ENERGY': after('perturbation'),
+  'RI-MP2 TOTAL ENERGY': after('perturbation'),
   'DLPNO-MP2 TOTAL ENERGY': after('perturbation'),
+  'ORCA MP2 CALCULATION': after('perturbation'),
+  'E(CCSD(T))': after('coupled cluster'),
   'DE(CIS) =': after('excited state'),
   // E(SCF)  =   -382.055107108 Eh
   'E(SCF) =': (line, state) => {

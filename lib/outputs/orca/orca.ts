@@ -1,6 +1,7 @@
 import { cite } from '../cite';
 import { readInteger, words } from '../numbers';
 import { defineProgram, type LandmarkMap, type ProgramResult } from '../program';
+import { addStep } from '../step-list';
 import type { Step } from '../record';
 import { emptyDeck, type Cited } from './deck';
 import { energyLandmarks } from './energy';
@@ -58,7 +59,7 @@ function closeStep(state: OrcaState): void {
     point.scf.converged = false;
     cite(point, 'scf.converged', state.scfRunning);
   }
-  state.steps.push(current.finish());
+  addStep(state.steps, current.finish());
   state.current = null;
   state.optimising = false;
   state.displaced = false;
