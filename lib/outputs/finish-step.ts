@@ -6,8 +6,12 @@ import { warn } from './warnings';
 /** Largest difference between the sum of spin populations and 2S that rounding explains, per atom. */
 const SPIN_SUM_PER_ATOM = 0.006;
 
-/** Completes a step by what follows from its values and warns of those that contradict one another. */
+/**
+ * Completes a step by what follows from its values and warns of those that contradict one another.
+ * Doing it twice changes nothing.
+ */
 export function finishStep(step: Step): Step {
+  if (step.warnings.some(({ code }) => code === 'steps-abridged')) return step;
   const { geometry } = step;
   if (geometry) {
     step.formula = hillFormula(geometry.elements);
@@ -23,6 +27,7 @@ export function finishStep(step: Step): Step {
     }
   } else if (step.energyHartree !== null)
     warn(step, 'energy-without-geometry', lineOf(step, 'energyHartree'));
+  checkPopulations(step);
   checkElectrons(step);
   checkSpinSum(step);
   if (step.scf.converged === false) warn(step, 'scf-not-converged', lineOf(step, 'scf.converged'));
@@ -50,7 +55,7 @@ function checkElectrons(step: Step): void {
       ? geometry.elements.reduce((sum, element) => sum + (atomicNumber(element) ?? 0), 0) - charge
       : null;
   const electrons = electronCount ?? counted;
-  if (electrons !== null && multiplicity !== null && (electrons + Math.abs(multiplicity)) % 2 === 0)
+  if (electrons !== null && multiplicity !== null && (electrons + multiplicity) % 2 === 0)
     warn(
       step,
       'spin-multiplicity-parity',
@@ -68,13 +73,33 @@ function checkElectrons(step: Step): void {
     );
 }
 
+/** A table of populations that is not of the atoms of the geometry is left out. */
+function checkPopulations(step: Step): void {
+  const elements = step.geometry?.elements;
+  if (!elements) return;
+  const fits = ({ atoms }: Step['populations'][number]) =>
+    atoms.length === elements.length && atoms.every((atom, i) => atom.element === elements[i]);
+  for (const population of step.populations) {
+    if (fits(population)) continue;
+    const path = `populations.${population.scheme}`;
+    warn(
+      step,
+      'table-damaged',
+      lineOf(step, path),
+      `The ${population.scheme} table does not list the atoms.`,
+    );
+    delete step.evidence[path];
+  }
+  step.populations = step.populations.filter(fits);
+}
+
 function checkSpinSum(step: Step): void {
   if (step.multiplicity === null) return;
-  const unpaired = Math.sign(step.multiplicity) * (Math.abs(step.multiplicity) - 1);
+  const unpaired = step.multiplicity - 1;
   for (const { scheme, atoms } of step.populations) {
     if (atoms.some((atom) => atom.spin === null)) continue;
     const sum = atoms.reduce((total, atom) => total + (atom.spin ?? 0), 0);
-    if (Math.abs(sum - unpaired) > Math.max(0.02, SPIN_SUM_PER_ATOM * atoms.length))
+    if (Math.abs(Math.abs(sum) - unpaired) > Math.max(0.02, SPIN_SUM_PER_ATOM * atoms.length))
       warn(
         step,
         'spin-sum',

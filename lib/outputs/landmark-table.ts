@@ -22,6 +22,8 @@ export class LandmarkTable {
       .map((landmark) => ({ pattern: encoder.encode(landmark.text), landmark }))
       .sort((a, b) => b.pattern.length - a.pattern.length);
     for (const entry of compiled) this.add(entry);
+    // Few lines start with a tab; they are all looked at.
+    this.present.fill(1, TAB * 256, (TAB + 1) * 256);
   }
 
   private add(entry: CompiledLandmark): void {
@@ -46,11 +48,13 @@ export class LandmarkTable {
   /** The longest landmark that the line in bytes[from, to) starts with. */
   find(bytes: Uint8Array, from: number, to: number): Landmark | undefined {
     let at = from;
-    while (at < to && bytes[at] === BLANK) at++;
+    while (at < to && (bytes[at] === BLANK || bytes[at] === TAB)) at++;
     if (at >= to) return undefined;
     const second = at + 1 < to ? (bytes[at + 1] as number) : NEWLINE;
     const candidates = this.byStart.get((bytes[at] as number) * 256 + second);
-    return candidates?.find(({ pattern }) => startsWith(bytes, at, to, pattern))?.landmark;
+    if (!candidates) return undefined;
+    for (const { pattern, landmark } of candidates) if (startsWith(bytes, at, to, pattern)) return landmark;
+    return undefined;
   }
 }
 

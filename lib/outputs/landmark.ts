@@ -18,8 +18,15 @@ export interface Landmark {
   text: string;
   /** Called with the landmark's line; a returned section takes the lines that follow. Closes an open one. */
   read(line: Line): Section | void;
+  /**
+   * A look at the bytes [from, to) of the line before it becomes text; false passes the line over. For lists
+   * of thousands of rows of which one or two count; the bytes are valid during the call only.
+   */
+  glance?(bytes: Uint8Array, from: number, to: number, lineNumber: number): boolean;
   /** Is looked for inside exclusive sections too (program banners). */
   always?: boolean;
+  /** Is looked for only while no section is open (rules and other lines that tables contain too). */
+  onlyOutside?: boolean;
   /** Is read from a last line without newline too. */
   evenUnended?: boolean;
 }

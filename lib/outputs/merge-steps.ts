@@ -68,7 +68,7 @@ function lend(from: Step, to: Step): void {
  */
 export function mergeSteps(
   program: Program | null,
-  { steps, outcome, failure }: ProgramResult,
+  { steps, outcome, failure, whole }: ProgramResult,
   size: { bytes: number; lines: number },
 ): OutputRecord {
   const lastFinished = steps.findLastIndex((step) => step.outcome === 'finished');
@@ -80,7 +80,11 @@ export function mergeSteps(
     failure,
     tasks: [...last.tasks],
     populations: [...last.populations],
-    evidence: { ...last.evidence },
+    resources: {
+      wallSeconds: whole?.resources.wallSeconds ?? last.resources.wallSeconds,
+      cores: whole?.resources.cores ?? last.resources.cores,
+    },
+    evidence: { ...last.evidence, ...whole?.evidence },
     warnings: [...last.warnings],
   };
   for (const earlier of steps.slice(0, Math.max(index, 0)).reverse()) {

@@ -1,13 +1,25 @@
+const isDigit = (code: number) => code >= 48 && code <= 57;
+
 /**
  * A printed number: "-382.30", "1.0D-01" (Fortran exponent), "  6.". Only the whole text counts.
  * @returns null for stars (overflow), inf, nan, blanks and anything else that is no finite number
  */
 export function readNumber(text: string | undefined): number | null {
   if (text === undefined || text.length > 64) return null;
-  const trimmed = text.trim();
-  if (!/^[+-]?(?:\d+\.?\d*|\.\d+)(?:[eEdD][+-]?\d+)?$/.test(trimmed)) return null;
-  const value = Number(trimmed.replace(/[dD]/, 'e'));
-  return Number.isFinite(value) ? value : null;
+  // Number() takes more than a program prints ("0x1F", "Infinity", ""), so the characters are looked at first.
+  let hasDigit = false;
+  let fortranExponent = false;
+  for (let i = 0; i < text.length; i++) {
+    const code = text.charCodeAt(i);
+    if (isDigit(code)) hasDigit = true;
+    else if (code === 68 || code === 100)
+      fortranExponent = true; // D, d
+    else if (code !== 43 && code !== 45 && code !== 46 && code !== 69 && code !== 101 && code !== 32)
+      return null;
+  }
+  if (!hasDigit) return null;
+  const value = Number(fortranExponent ? text.replace(/[dD]/, 'e') : text);
+  return Number.isFinite(value) ? value + 0 : null; // -0 is printed for small negative values; it is 0
 }
 
 /** A printed whole number, or null. */
@@ -24,22 +36,29 @@ export function after(text: string, mark: string): string | undefined {
 
 /** The blank-separated words of a line. */
 export function words(text: string): string[] {
-  return text
-    .split(' ')
-    .flatMap((word) => word.split('\t'))
-    .filter((word) => word !== '');
+  return text.match(/\S+/g) ?? [];
+}
+
+/** The first word of a text. */
+function firstWord(text: string): string | undefined {
+  return /\S+/.exec(text)?.[0];
 }
 
 /** The first number after a mark, where text may follow it: `numberAfter("E = -1.5 Eh", "=")` is −1.5. */
 export function numberAfter(text: string, mark: string): number | null {
   const rest = after(text, mark);
-  return rest === undefined ? null : readNumber(words(rest)[0]);
+  return rest === undefined ? null : readNumber(firstWord(rest));
 }
 
 /** The first whole number after a mark. */
 export function integerAfter(text: string, mark: string): number | null {
   const rest = after(text, mark);
-  return rest === undefined ? null : readInteger(words(rest)[0]);
+  return rest === undefined ? null : readInteger(firstWord(rest));
+}
+
+/** The whole number that is all that stands after a mark, as in "Charge    ....   -1". */
+export function soleIntegerAfter(text: string, mark: string): number | null {
+  return readInteger(after(text, mark));
 }
 
 /**
@@ -48,5 +67,6 @@ export function integerAfter(text: string, mark: string): number | null {
  * @returns null in the places of stars and other text
  */
 export function readNumbers(text: string): (number | null)[] {
-  return words(text.replace(/(\d)-(?=\d*\.)/g, '$1 -')).map((word) => readNumber(word));
+  const apart = /\d-/.test(text) ? text.replace(/(\d)-(?=\d*\.)/g, '$1 -') : text;
+  return words(apart).map((word) => readNumber(word));
 }

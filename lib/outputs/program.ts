@@ -4,7 +4,7 @@
  *     export const example = defineProgram<ExampleState>({
  *       name: 'NWChem',
  *       marks: ['Example Package, version'],          // any of these lines says that the file is this program's
- *       start: () => ({ steps: new StepList('NWChem'), … }),   // what is known so far; a fresh one per file
+ *       start: () => ({ steps: [], current: null, … }),         // what is known so far; a fresh one per file
  *       landmarks: { ...runLandmarks, ...energyLandmarks },    // text → what to do with that line
  *       end: (state) => ({ steps, outcome, failure }),
  *     });
@@ -14,13 +14,15 @@
  *   lines below. A landmark closes whatever section is open; a section that was not closed by its own last line
  *   has saved nothing, so a table cut short is absent instead of half read. `rowTable` (row-table.ts) writes
  *   the usual section in one expression.
- * - To mark a landmark as looked for inside echoed input, or as a closing line, give `{ read, always: true }` or
- *   `{ read, evenUnended: true }` in place of the function.
+ * - In place of the function, `{ read, always: true }` marks a landmark that is looked for inside echoed input
+ *   too, `{ read, onlyOutside: true }` one that must not break off a table, `{ read, evenUnended: true }` a closing
+ *   line; `glance` looks at the bytes first, for rows by the hundred thousand (nwchem/orbitals.ts).
  * - The line that recognised the program is shown to its landmarks too.
- * - Values go into the current step (`StepList.current`) by plain assignment, and `cite(step, 'spin.s2', line)`
- *   (cite.ts) keeps the line as evidence. Numbers are read with numbers.ts: stars, `inf` and nonsense are null.
+ * - A job is a `StepDraft` (step-draft.ts): values of the job go into its `step`, those of one geometry into its
+ *   `point`, by plain assignment, and `cite(holder, 'spin.s2', line)` (cite.ts) keeps the line as evidence. When
+ *   the job is over, `addStep(steps, draft.finish())` (step-list.ts). Numbers are read with numbers.ts: stars, `inf` and nonsense are null.
  * - What is true for every program (formula, atom count, warnings on parity and spin sums, the top level) is done
- *   after `end` by finish-step.ts and merge-steps.ts; a program file reports only what is printed.
+ *   by finish-step.ts and merge-steps.ts; a program file reports only what is printed.
  *
  * A fifth program is one such file (a folder with a file per section past 250 lines), one line in programs.ts,
  * its name in record.ts, and its fixtures.
@@ -33,13 +35,17 @@ export interface ProgramResult {
   steps: Step[];
   outcome: Outcome;
   failure: Failure | null;
+  /** Timings of the whole file where they are printed apart from those of the steps, with their evidence. */
+  whole?: Pick<Step, 'resources' | 'evidence'>;
 }
 
 export type LandmarkReader<State> = (line: Line, state: State) => Section | void;
 
 export interface LandmarkEntry<State> {
   read: LandmarkReader<State>;
+  glance?: (bytes: Uint8Array, from: number, to: number, lineNumber: number, state: State) => boolean;
   always?: boolean;
+  onlyOutside?: boolean;
   evenUnended?: boolean;
 }
 
@@ -73,8 +79,11 @@ export function defineProgram<State>(definition: {
       const state = start();
       return {
         landmarks: Object.entries(landmarks).map(([text, entry]) => {
-          const { read, ...options } = typeof entry === 'function' ? { read: entry } : entry;
-          return { text, ...options, read: (line) => read(line, state) };
+          const { read, glance, ...options } = typeof entry === 'function' ? { read: entry } : entry;
+          const landmark: Landmark = { text, ...options, read: (line) => read(line, state) };
+          if (glance)
+            landmark.glance = (bytes, from, to, lineNumber) => glance(bytes, from, to, lineNumber, state);
+          return landmark;
         }),
         end: () => end(state),
       };

@@ -1,9 +1,10 @@
 import type { Landmark } from './landmark';
 import { finishStep } from './finish-step';
 import { mergeSteps } from './merge-steps';
-import type { ProgramDefinition, ProgramReading } from './program';
+import { stoppedWithoutWord, watchInterruptions } from './interruptions';
+import type { ProgramDefinition, ProgramReading, ProgramResult } from './program';
 import { programs } from './programs';
-import type { OutputRecord } from './record';
+import type { Failure, OutputRecord } from './record';
 import { LineScanner } from './scanner';
 
 /**
@@ -32,13 +33,14 @@ export interface OutputReader {
 export function createOutputReader(known: readonly ProgramDefinition[] = programs): OutputReader {
   let program: ProgramDefinition | null = null;
   let reading: ProgramReading | null = null;
+  const interruptions = watchInterruptions();
   const marks: Landmark[] = known.flatMap((candidate) =>
     candidate.marks.map((text) => ({
       text,
       read(line) {
         program = candidate;
         reading = candidate.open();
-        return scanner.switchTo(reading.landmarks, line);
+        return scanner.switchTo([...reading.landmarks, ...interruptions.landmarks], line);
       },
     })),
   );
@@ -47,7 +49,7 @@ export function createOutputReader(known: readonly ProgramDefinition[] = program
     push: (chunk) => scanner.push(chunk),
     end() {
       scanner.end();
-      const result = reading?.end() ?? { steps: [], outcome: 'cut off', failure: null };
+      const result = completeFailure(reading?.end() ?? null, interruptions.failure());
       const steps = result.steps.map(finishStep);
       const size = { bytes: scanner.bytes, lines: scanner.lines };
       return {
@@ -56,6 +58,17 @@ export function createOutputReader(known: readonly ProgramDefinition[] = program
       };
     },
   };
+}
+
+/** A run that stopped has a failure too: what the scheduler said, or that nobody said anything. */
+function completeFailure(result: ProgramResult | null, interruption: Failure | null): ProgramResult {
+  if (!result) return { steps: [], outcome: 'cut off', failure: null };
+  if (result.outcome === 'finished' || result.failure) return result;
+  const failure = interruption ?? stoppedWithoutWord;
+  const steps = result.steps.map((step, i) =>
+    i === result.steps.length - 1 && step.outcome !== 'finished' ? { ...step, failure } : step,
+  );
+  return { ...result, steps, failure };
 }
 
 /** The record of an output that is in memory whole or in pieces. */

@@ -99,7 +99,6 @@ export const warningCodeSchema = z.enum([
   'not-dft',
   'energy-is-reference',
   'beta-excess',
-  'point-charges',
   'unknown-program',
   'steps-abridged',
 ]);

@@ -9,7 +9,7 @@ import { LandmarkTable } from './landmark-table';
  * line moves to the buffer's beginning; a line longer than MAX_LINE_BYTES holds no landmark of any program
  * and is counted but never looked at. The caller may reuse a piece's memory as soon as `push` returns.
  *
- * How landmarks are compared: leading blanks of the line are skipped; one blank in the landmark stands for
+ * How landmarks are compared: leading blanks (and tabs) of the line are skipped; one blank in the landmark stands for
  * one or more blanks in the line; everything else byte by byte; the longest landmark that fits wins.
  * A landmark therefore is the beginning of a line, never something in its middle.
  *
@@ -153,11 +153,14 @@ export class LineScanner {
     if (to - from > MAX_LINE_BYTES) return;
     const begin = this.lines === 1 && startsWithByteOrderMark(buffer) ? from + 3 : from;
     const stop = to > begin && buffer[to - 1] === RETURN ? to - 1 : to;
-    const found = this.table.find(buffer, begin, stop);
-    const line = () => ({ text: decode(buffer.subarray(begin, stop)), number: this.lines });
-    if (found && (!section?.exclusive || found.always) && (!unended || found.evenUnended)) {
-      this.section = found.read(line()) ?? null;
-    } else if (section && !unended && !section.take(line())) this.section = null;
+    const landmark = this.table.find(buffer, begin, stop);
+    const shut = section !== null && (landmark?.onlyOutside || (section.exclusive && !landmark?.always));
+    const found = shut || (unended && !landmark?.evenUnended) ? undefined : landmark;
+    if (!found && (section === null || unended)) return;
+    if (found?.glance && !found.glance(buffer, begin, stop, this.lines)) return;
+    const line = { text: decode(buffer, begin, stop), number: this.lines };
+    if (found) this.section = found.read(line) ?? null;
+    else if (section && !section.take(line)) this.section = null;
   }
 }
 
@@ -198,16 +201,16 @@ function startsWithByteOrderMark(bytes: Uint8Array): boolean {
 const utf8 = new TextDecoder('utf-8', { ignoreBOM: true });
 const latin1 = new TextDecoder('latin1');
 
-function decode(bytes: Uint8Array): string {
+function decode(bytes: Uint8Array, from: number, to: number): string {
   // A plain line is some times quicker this way than through a TextDecoder.
-  if (isShortAscii(bytes)) return String.fromCharCode.apply(null, bytes as Uint8Array & number[]);
-  const text = utf8.decode(bytes);
-  return text.includes('\uFFFD') ? latin1.decode(bytes) : text;
+  if (to - from <= 256 && isAscii(bytes, from, to))
+    return String.fromCharCode.apply(null, bytes.subarray(from, to) as Uint8Array & number[]);
+  const text = utf8.decode(bytes.subarray(from, to));
+  return text.includes('\uFFFD') ? latin1.decode(bytes.subarray(from, to)) : text;
 }
 
-function isShortAscii(bytes: Uint8Array): boolean {
-  if (bytes.length > 256) return false;
+function isAscii(bytes: Uint8Array, from: number, to: number): boolean {
   let all = 0;
-  for (let i = 0; i < bytes.length; i++) all |= bytes[i] as number;
+  for (let i = from; i < to; i++) all |= bytes[i] as number;
   return all < 0x80;
 }

@@ -13,23 +13,40 @@ export type Point = Pick<
   | 'orbitals'
   | 'dipoleDebye'
   | 'geometry'
+  | 'frequencies'
+  | 'thermochemistry'
+  | 'stability'
   | 'evidence'
   | 'warnings'
 >;
 
 function emptyPoint(): Point {
-  const { energyHartree, scf, spin, populations, orbitals, dipoleDebye, geometry, evidence, warnings } =
-    emptyStep(null);
-  return { energyHartree, scf, spin, populations, orbitals, dipoleDebye, geometry, evidence, warnings };
+  const empty = emptyStep(null);
+  return {
+    energyHartree: empty.energyHartree,
+    scf: empty.scf,
+    spin: empty.spin,
+    populations: empty.populations,
+    orbitals: empty.orbitals,
+    dipoleDebye: empty.dipoleDebye,
+    geometry: empty.geometry,
+    frequencies: empty.frequencies,
+    thermochemistry: empty.thermochemistry,
+    stability: empty.stability,
+    evidence: empty.evidence,
+    warnings: empty.warnings,
+  };
 }
 
-/** Whether two geometries are the same as far as they are printed (1e-5 Å, same frame, same order). */
-export function isSameGeometry(a: Geometry, b: Geometry): boolean {
+/** Whether two geometries are the same within a tolerance (Å), in the same frame and order of atoms. */
+export function isSameGeometry(a: Geometry, b: Geometry, toleranceAngstrom = 1e-5): boolean {
   return (
     a.elements.length === b.elements.length &&
     a.elements.every((element, i) => element === b.elements[i]) &&
     a.positionsAngstrom.every((position, i) =>
-      position.every((value, axis) => Math.abs(value - (b.positionsAngstrom[i]?.[axis] ?? Infinity)) < 1e-5),
+      position.every(
+        (value, axis) => Math.abs(value - (b.positionsAngstrom[i]?.[axis] ?? Infinity)) < toleranceAngstrom,
+      ),
     )
   );
 }
@@ -37,7 +54,7 @@ export function isSameGeometry(a: Geometry, b: Geometry): boolean {
 /**
  * A step while it is being read. What belongs to the job as a whole (charge, method, optimisation history,
  * frequencies, timings) goes into `step`; what belongs to one geometry (energy, spin, populations, orbitals,
- * dipole) into `point`. A new geometry opens a new point, so that tables of an earlier geometry never stand
+ * dipole, frequencies, thermochemistry, stability) into `point`. A new geometry opens a new point, so that tables of an earlier geometry never stand
  * beside a later energy, and a last geometry that got no energy does not take the place of the one that has.
  */
 export class StepDraft {
@@ -54,9 +71,13 @@ export class StepDraft {
     return this.settled;
   }
 
-  /** Opens a new point; the present one is kept as the result so far if it has an energy. */
+  /**
+   * Opens a new point; the present one is kept as the result so far if it has an energy, and a geometry
+   * (unless no point had one yet).
+   */
   nextPoint(): void {
-    if (this.point.energyHartree !== null) this.settled = this.point;
+    const { point, settled } = this;
+    if (point.energyHartree !== null && (point.geometry !== null || !settled?.geometry)) this.settled = point;
     this.point = emptyPoint();
   }
 
@@ -66,10 +87,18 @@ export class StepDraft {
    */
   setGeometry(geometry: Geometry, line: Line): void {
     const { point } = this;
-    if (point.geometry && isSameGeometry(point.geometry, geometry)) return;
+    if (point.geometry && isSameGeometry(point.geometry, geometry, 1e-9)) return;
     if (point.geometry || point.energyHartree !== null) this.nextPoint();
     this.point.geometry = geometry;
     cite(this.point, 'geometry', line);
+  }
+
+  /** A new wavefunction at the same geometry: the tables of the one before are not its own. */
+  sameGeometryAgain(): void {
+    const { geometry, evidence } = this.point;
+    this.nextPoint();
+    this.point.geometry = geometry;
+    if (evidence.geometry) this.point.evidence.geometry = evidence.geometry;
   }
 
   /** The step with the values of its last point that has an energy (of the last one when none has). */
@@ -82,6 +111,8 @@ export class StepDraft {
     const step: Step = {
       ...this.step,
       ...values,
+      frequencies: values.frequencies ?? this.step.frequencies,
+      thermochemistry: values.thermochemistry ?? this.step.thermochemistry,
       evidence: { ...this.step.evidence, ...evidence },
       warnings: [...this.step.warnings, ...warnings],
     };

@@ -23,7 +23,6 @@ export const warningMessages: Record<WarningCode, string> = {
   'energy-is-reference':
     'A correlated or excited-state energy is printed too; the energy is that of the SCF.',
   'beta-excess': 'The multiplicity is printed negative: beta electrons are in excess.',
-  'point-charges': 'The number of atoms printed includes point charges or ghost atoms.',
   'unknown-program': 'No output of ORCA, Gaussian, NWChem or Psi4 was recognised.',
   'steps-abridged': 'The file has very many steps; tables of the earlier ones were left out.',
 };

@@ -22,6 +22,7 @@ function seen(
 
 describe('LineScanner', () => {
   it('shows lines that start with a landmark, whatever the indentation and the run of blanks', () => {
+    expect(seen('\t << step\n', ['<< step']).lines).toHaveLength(1);
     const { lines } = seen('x\n   Total Energy       :  -1.5\nTotal Energie\n', ['Total Energy :']);
     expect(lines).toEqual([{ text: '   Total Energy       :  -1.5', number: 2 }]);
   });

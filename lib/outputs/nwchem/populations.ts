@@ -1,0 +1,78 @@
+import { elementOfTag } from '../element-of-tag';
+import type { Line, Section } from '../landmark';
+import { readInteger, readNumber, words } from '../numbers';
+import { addSpins, setPopulation } from '../population';
+import type { LandmarkMap } from '../program';
+import type { Population } from '../record';
+import { rowTable } from '../row-table';
+import { warn } from '../warnings';
+import type { NwchemState } from './state';
+
+interface Row {
+  index: number;
+  element: string;
+  nuclearCharge: number;
+  /** Printed text, for its number of decimals. */
+  value: string;
+  line: Line;
+}
+
+//     1 Fe  26    26.00   2.00  2.00  6.00  2.00  6.02
+function readRow(line: Line): Row | null {
+  const [first, tag = '', charge, value] = words(line.text);
+  const index = readInteger(first);
+  const nuclearCharge = readInteger(charge);
+  if (index === null || nuclearCharge === null || value === undefined) return null;
+  const element = elementOfTag(tag, nuclearCharge);
+  return element ? { index, element, nuclearCharge, value, line } : null;
+}
+
+function isWhole(rows: Row[]): boolean {
+  return rows.every((row, i) => row.index === i + 1 && readNumber(row.value) !== null);
+}
+
+/** Net charge as printed populations allow: the nuclear charge less the electrons, to the same decimals. */
+function netCharge({ nuclearCharge, value }: Row): number {
+  const decimals = value.split('.')[1]?.length ?? 0;
+  return Number((nuclearCharge - (readNumber(value) ?? 0)).toFixed(Math.min(decimals, 12)));
+}
+
+/** How far net charges may miss the charge of the molecule by rounding alone, per atom. */
+const CHARGE_SUM_PER_ATOM = 0.006;
+
+function saveTotal(rows: Row[], scheme: Population['scheme'], state: NwchemState): void {
+  const first = rows[0]?.line;
+  if (!state.current || !first) return;
+  const { point, step } = state.current;
+  const atoms = rows.map((row) => ({ element: row.element, charge: netCharge(row), spin: null }));
+  const sum = atoms.reduce((total, atom) => total + atom.charge, 0);
+  // With core potentials the electrons of the core are missing: the difference is no net charge then.
+  const adds = step.charge === null || Math.abs(sum - step.charge) < 0.05 + CHARGE_SUM_PER_ATOM * rows.length;
+  if (!isWhole(rows) || !adds) warn(point, 'table-damaged', first.number);
+  else setPopulation(point, { scheme, atoms }, first);
+}
+
+function saveSpin(rows: Row[], scheme: Population['scheme'], state: NwchemState): void {
+  const first = rows[0]?.line;
+  if (!state.current || !first) return;
+  const spins = rows.map(({ element, value }) => ({ element, spin: readNumber(value) }));
+  const { point } = state.current;
+  if (!isWhole(rows) || !addSpins(point, scheme, spins, first)) warn(point, 'table-damaged', first.number);
+}
+
+/** Tables before the energy are those of the guess and are passed over. */
+function table(save: typeof saveTotal, scheme: Population['scheme']) {
+  return (_: Line, state: NwchemState): Section | void => {
+    if (!state.afterEnergy) return;
+    return rowTable<Row>({ heading: 6, row: readRow, save: (rows) => save(rows, scheme, state) });
+  };
+}
+
+export const populationLandmarks: LandmarkMap<NwchemState> = {
+  'Total Density - Mulliken Population Analysis': table(saveTotal, 'Mulliken'),
+  'Spin Density - Mulliken Population Analysis': table(saveSpin, 'Mulliken'),
+  'Total Density - Lowdin Population Analysis': table(saveTotal, 'Löwdin'),
+  'Spin Density - Lowdin Population Analysis': table(saveSpin, 'Löwdin'),
+  'Mulliken analysis of the total density': table(saveTotal, 'Mulliken'),
+  'Mulliken analysis of the spin density': table(saveSpin, 'Mulliken'),
+};
