@@ -1,11 +1,12 @@
 import type { Vector3 } from '../chemistry/structure';
-import { cisAngles } from './octahedral-pairs';
+import { cisAngles } from './cis-angles';
 import { sphereAngles } from './sphere-angles';
 
 const TETRAHEDRAL_DEGREES = (Math.acos(-1 / 3) * 180) / Math.PI;
 
 /**
- * Bond-angle variance σ² = Σ (θᵢ − θ₀)² / (m − 1): for six donors the twelve cis angles against 90°, for four
+ * Bond-angle variance σ² = Σ (θᵢ − θ₀)² / (m − 1): for six donors the twelve cis angles (the
+ * twelve smallest) against 90°, for four
  * donors the six angles against 109.4712°.
  * @param donors - relative to the metal
  * @returns degrees², 0 for the regular polyhedron; null unless there are four or six donors

@@ -50,11 +50,3 @@ export function octahedralPairs(donors: readonly Vector3[]): OctahedralPairs {
   }
   return best;
 }
-
-/** The twelve cis angles of six donors, degrees: all but the three of the trans pairs. */
-export function cisAngles(donors: readonly Vector3[]): number[] {
-  const pairs = octahedralPairs(donors);
-  return sphereAngles(donors)
-    .filter(({ first, second }) => !pairs.some(([i, j]) => i === first && j === second))
-    .map(({ degrees }) => degrees);
-}
