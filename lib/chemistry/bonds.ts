@@ -19,6 +19,8 @@ export interface BondGraph {
   bonds: Bond[];
   /** `neighbours[i]`: indices of the atoms bonded to atom i. */
   neighbours: number[][];
+  /** `metals[i]`: whether atom i is a metal. */
+  metals: boolean[];
 }
 
 /**
@@ -51,7 +53,9 @@ export function findBonds(structure: Structure): BondGraph {
     neighbours[first]?.push(second);
     neighbours[second]?.push(first);
   });
-  return { bonds, neighbours };
+  const metalKinds = new Map([...new Set(elements)].map((element) => [element, isMetal(element)]));
+  const metals = elements.map((element) => metalKinds.get(element) ?? false);
+  return { bonds, neighbours, metals };
 }
 
 /**

@@ -36,7 +36,10 @@ export function centroid(points: readonly Vector3[]): Vector3 {
  * where the arccosine loses half of the digits.
  */
 export function angleDegrees(a: Vector3, b: Vector3): number {
-  return (Math.atan2(norm(cross(a, b)), dot(a, b)) * 180) / Math.PI;
+  const x = a[1] * b[2] - a[2] * b[1];
+  const y = a[2] * b[0] - a[0] * b[2];
+  const z = a[0] * b[1] - a[1] * b[0];
+  return (Math.atan2(Math.sqrt(x * x + y * y + z * z), dot(a, b)) * 180) / Math.PI;
 }
 
 export interface SymmetricEigen {
@@ -58,10 +61,12 @@ export function symmetricEigen(matrix: readonly (readonly number[])[]): Symmetri
   const v = new Float64Array(n * n);
   for (let i = 0; i < n; i++) v[i * n + i] = 1;
   const at = (m: Float64Array, i: number, j: number) => m[i * n + j] ?? 0;
+  // Off-diagonal squares below rounding of the whole matrix cannot move an eigenvalue any more.
+  const negligible = 1e-33 * a.reduce((sum, x) => sum + x * x, 0);
   for (let sweep = 0; sweep < 60; sweep++) {
     let off = 0;
     for (let i = 0; i < n; i++) for (let j = i + 1; j < n; j++) off += at(a, i, j) ** 2;
-    if (off < 1e-300) break;
+    if (off <= negligible) break;
     for (let p = 0; p < n; p++) {
       for (let q = p + 1; q < n; q++) {
         const apq = at(a, p, q);

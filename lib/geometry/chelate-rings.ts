@@ -1,5 +1,4 @@
 import { type BondGraph, shortestPath } from '../chemistry/bonds';
-import { isMetal } from '../chemistry/elements';
 import { angleDegrees, cross, subtract } from '../chemistry/linear-algebra';
 import type { Structure } from '../chemistry/structure';
 import type { CoordinationSphere } from './coordination-sphere';
@@ -25,8 +24,8 @@ export function chelateRings(
   sphere: CoordinationSphere,
 ): ChelateRing[] {
   const { donors, index: metal } = sphere;
-  const { elements, positionsAngstrom } = structure;
-  const isBarred = (atom: number) => isMetal(elements[atom] ?? '');
+  const { positionsAngstrom } = structure;
+  const isBarred = (atom: number) => graph.metals[atom] ?? false;
   const donorIndices = new Set(donors.map((donor) => donor.index));
   const metalAt = positionsAngstrom[metal] ?? [0, 0, 0];
   const offset = (atom: number) => subtract(positionsAngstrom[atom] ?? metalAt, metalAt);

@@ -1,3 +1,4 @@
+import { norm } from '../chemistry/linear-algebra';
 import { optimalRotation, rotate } from '../chemistry/optimal-rotation';
 import type { Vector3 } from '../chemistry/structure';
 import type { IdealPolyhedron } from './ideal-polyhedra';
@@ -12,6 +13,12 @@ export interface ShapeMeasure {
 
 /** Donors and vertices up to this number: the coordination numbers with ideal polyhedra. */
 const MOST_VERTICES = 9;
+
+/**
+ * When the slope of the polynomial at its largest root falls below this share, two roots meet there and
+ * Newton's method leaves only half of the digits; then the root is taken from the eigenvalue problem.
+ */
+const DOUBLE_ROOT = 1e-3;
 
 interface Prepared {
   tree: readonly PairingStep[] | null;
@@ -60,10 +67,7 @@ export function continuousShapeMeasure(
   const donorSpread = spreadWithMetal(donors, donorSum);
   if (!(donorSpread > 0)) return null;
 
-  const pairing = bestPairing(donors, ideal.vertices, donorSum, idealSum, tree);
-  const centredDonors = withMetal(donors, donorSum);
-  const paired = pairing.map((vertex): Vector3 => ideal.vertices[vertex] ?? [0, 0, 0]);
-  const { overlap } = optimalRotation(centredDonors, withMetal(paired, idealSum));
+  const { pairing, overlap } = bestPairing(donors, ideal.vertices, donorSum, idealSum, tree);
   return { measure: Math.max(0, 100 * (1 - (overlap * overlap) / (donorSpread * idealSpread))), pairing };
 }
 
@@ -130,14 +134,15 @@ function bestPairing(
   donorSum: Vector3,
   idealSum: Vector3,
   tree: readonly PairingStep[] | null,
-): number[] {
+): { pairing: number[]; overlap: number } {
   const n = donors.length;
   const every: readonly PairingStep[] = vertices.map((_, vertex) => ({ vertex, next: null }));
   // What the donors from k on can add at most: each vertex has length 1.
   const rest = new Float64Array(n + 1);
-  for (let k = n - 1; k >= 0; k--) rest[k] = rest[k + 1]! + Math.hypot(...donors[k]!);
+  for (let k = n - 1; k >= 0; k--) rest[k] = rest[k + 1]! + norm(donors[k]!);
   const current = new Array<number>(n).fill(0);
   let best = -1;
+  let isDoubleRoot = false;
   let bestFound: number[] = vertices.map((_, i) => i);
 
   const descend = (
@@ -178,21 +183,29 @@ function bestPairing(
         if (overlap > best) {
           best = overlap;
           bestFound = [...current];
+          isDoubleRoot = overlap * (overlap * overlap - f) - 2 * d < DOUBLE_ROOT * overlap ** 3;
         }
         return;
       }
     }
-    const [x, y, z] = donors[k]!;
-    for (const step of steps ?? every) {
-      const { vertex, next } = step;
-      const bit = 1 << vertex;
+    const donor = donors[k]!;
+    const x = donor[0];
+    const y = donor[1];
+    const z = donor[2];
+    const choices = steps ?? every;
+    for (let i = 0; i < choices.length; i++) {
+      const step = choices[i]!;
+      const bit = 1 << step.vertex;
       if (used & bit) continue;
-      const [a, b, c] = vertices[vertex]!;
-      current[k] = vertex;
+      const point = vertices[step.vertex]!;
+      const a = point[0];
+      const b = point[1];
+      const c = point[2];
+      current[k] = step.vertex;
       descend(
         k + 1,
         used | bit,
-        next,
+        step.next,
         h0 + x * a,
         h1 + x * b,
         h2 + x * c,
@@ -211,7 +224,10 @@ function bestPairing(
   const [dx, dy, dz] = donorSum.map((component) => component * shift) as [number, number, number];
   const [px, py, pz] = idealSum;
   descend(0, 0, tree, dx * px, dx * py, dx * pz, dy * px, dy * py, dy * pz, dz * px, dz * py, dz * pz);
-  return bestFound;
+  if (!isDoubleRoot) return { pairing: bestFound, overlap: best };
+  const paired = bestFound.map((vertex): Vector3 => vertices[vertex] ?? [0, 0, 0]);
+  const { overlap } = optimalRotation(withMetal(donors, donorSum), withMetal(paired, idealSum));
+  return { pairing: bestFound, overlap };
 }
 
 /** Newton's method from above: it comes down to the largest root without passing it. */

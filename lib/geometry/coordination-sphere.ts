@@ -1,7 +1,6 @@
 import { type BondGraph, COINCIDENCE_ANGSTROM } from '../chemistry/bonds';
 import { covalentRadiusAngstrom, type SpinState } from '../chemistry/covalent-radii';
-import { isMetal } from '../chemistry/elements';
-import { angleDegrees, subtract } from '../chemistry/linear-algebra';
+import { angleDegrees, distance, subtract } from '../chemistry/linear-algebra';
 import { forEachNeighbourPair } from '../chemistry/neighbour-pairs';
 import type { Structure, Vector3 } from '../chemistry/structure';
 
@@ -82,17 +81,17 @@ export function findSpheres(
   options: SphereOptions = {},
 ): CoordinationSphere[] {
   const { elements } = structure;
-  const metals = elements.flatMap((element, index) => (isMetal(element) ? [index] : []));
+  const metals = graph.metals.flatMap((metal, index) => (metal ? [index] : []));
   const contacts = contactsOf(structure, metals, options);
   const changes = new Map((options.donorChanges ?? []).map((change) => [change.centre, change]));
   for (const centre of changes.keys()) {
-    if (!metals.includes(centre))
+    if (!graph.metals[centre])
       throw new RangeError(`donor change for atom ${centre}, which is no metal centre`);
   }
   return metals.map((index) => {
     const { candidates, metalContacts } = contacts.get(index) ?? { candidates: [], metalContacts: [] };
     candidates.sort((a, b) => a.excess - b.excess || a.index - b.index);
-    const found = chooseDonors(candidates, graph.neighbours, elements);
+    const found = chooseDonors(candidates, graph, elements);
     const donors = changeDonors(structure, index, found, changes.get(index));
     const removed = new Set(changes.get(index)?.remove);
     const longContacts = chooseLongContacts(structure, graph.neighbours, index, donors, candidates).filter(
@@ -166,16 +165,17 @@ function contactsOf(structure: Structure, metals: readonly number[], options: Sp
 /** @param candidates - by ascending excess */
 function chooseDonors(
   candidates: readonly Candidate[],
-  neighbours: BondGraph['neighbours'],
+  graph: BondGraph,
   elements: readonly string[],
 ): Candidate[] {
+  const { neighbours } = graph;
   const donors: Candidate[] = [];
   const excessOf = new Map<number, number>();
   let farthest = -Infinity;
   for (const candidate of candidates) {
     const { index, element, excess, compactExcess } = candidate;
     if (nobleGases.has(element)) continue;
-    if (element === 'H' && !isHydride(index, neighbours, elements)) continue;
+    if (element === 'H' && !isHydride(index, graph, elements)) continue;
     if (excess > SPHERE_TOLERANCES.donor) {
       const stretched =
         lonePairElements.has(element) &&
@@ -195,10 +195,10 @@ function chooseDonors(
   return donors;
 }
 
-function isHydride(index: number, neighbours: BondGraph['neighbours'], elements: readonly string[]): boolean {
-  return (neighbours[index] ?? []).every((neighbour) => {
+function isHydride(index: number, graph: BondGraph, elements: readonly string[]): boolean {
+  return (graph.neighbours[index] ?? []).every((neighbour) => {
     const element = elements[neighbour] ?? '';
-    return element === 'H' || element === 'B' || isMetal(element);
+    return element === 'H' || element === 'B' || graph.metals[neighbour];
   });
 }
 
@@ -244,7 +244,7 @@ function changeDonors(
       );
     }
     if (kept.some((donor) => donor.index === index)) return [];
-    return [{ index, element, distanceAngstrom: Math.hypot(...subtract(position, centre)) }];
+    return [{ index, element, distanceAngstrom: distance(position, centre) }];
   });
   return [...kept, ...added];
 }

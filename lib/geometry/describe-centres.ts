@@ -1,7 +1,7 @@
 import { type BondGraph, findBonds } from '../chemistry/bonds';
 import { covalentRadiusAngstrom } from '../chemistry/covalent-radii';
 import type { Structure, Vector3 } from '../chemistry/structure';
-import { subtract } from '../chemistry/linear-algebra';
+import { norm, subtract } from '../chemistry/linear-algebra';
 import { angleVarianceDegrees2 } from './angle-variance';
 import { baurDistortion } from './baur-distortion';
 import { bondValenceSums, supportedOxidationState } from './bond-valence-sum';
@@ -13,7 +13,7 @@ import { distancesByElement } from './distances-by-element';
 import { interconversionPath } from './interconversion-path';
 import { ionicRadiusSums } from './ionic-radius-sum';
 import { meanSquareDistortion } from './mean-square-distortion';
-import { octahedralPairs } from './octahedral-pairs';
+import { type OctahedralPairs, octahedralPairs } from './octahedral-pairs';
 import { planeDisplacement } from './plane-displacement';
 import { quadraticElongation } from './quadratic-elongation';
 import { sigmaDegrees } from './sigma';
@@ -77,7 +77,8 @@ function describeCentre(
   const longOffsets = longContacts.map(
     (contact): Vector3 => subtract(structure.positionsAngstrom[contact.index] ?? metalAt, metalAt),
   );
-  const split = axialSplit(offsets, longOffsets);
+  const pairs = offsets.length === 6 ? octahedralPairs(offsets) : undefined;
+  const split = axialSplit(offsets, longOffsets, pairs);
   const plane = planeDisplacement(offsets, split);
   const shapes = sphereShapes(offsets);
   const nearest = shapes[0]?.symbol ?? null;
@@ -100,7 +101,7 @@ function describeCentre(
     sites: sites.map(({ atoms, hapticity, offsetAngstrom }) => ({
       atoms,
       hapticity,
-      distanceAngstrom: Math.hypot(...offsetAngstrom),
+      distanceAngstrom: norm(offsetAngstrom),
     })),
     longContacts,
     metalContacts: sphere.metalContacts,
@@ -110,7 +111,7 @@ function describeCentre(
     meansByElement: distancesByElement(donors),
     baurDistortion: baurDistortion(distances),
     meanSquareDistortion: meanSquareDistortion(distances),
-    angles: listAngles(offsets),
+    angles: listAngles(offsets, pairs),
     chelates,
     axial: split && {
       ...split,
@@ -122,9 +123,9 @@ function describeCentre(
     tau4Prime: tau4Prime(offsets),
     tau5: tau5(offsets),
     sigmaDegrees: sigmaDegrees(offsets),
-    thetaDegrees: thetaDegrees(offsets),
+    thetaDegrees: thetaDegrees(offsets, pairs),
     angleVarianceDegrees2: angleVarianceDegrees2(offsets),
-    quadraticElongation: quadraticElongation(offsets),
+    quadraticElongation: quadraticElongation(offsets, pairs),
     chelatePlaneAngleDegrees: chelatePlaneAngleDegrees(structure, index, chelates),
     shapes: shapes.length > 0 ? shapes : null,
     nearest,
@@ -139,9 +140,11 @@ function describeCentre(
   };
 }
 
-function listAngles(offsets: readonly Vector3[]): CentreDescription['angles'] {
+function listAngles(
+  offsets: readonly Vector3[],
+  pairs: OctahedralPairs | undefined,
+): CentreDescription['angles'] {
   if (offsets.length > MOST_SITES_WITH_ANGLES) return [];
-  const pairs = offsets.length === 6 ? octahedralPairs(offsets) : null;
   return sphereAngles(offsets).map(({ first, second, degrees }) => ({
     sites: [first, second],
     angleDegrees: degrees,

@@ -36,7 +36,7 @@ const partings: readonly OctahedralPairs[] = [1, 2, 3, 4, 5].flatMap((mate) => {
  * @param donors - six positions relative to the metal
  */
 export function octahedralPairs(donors: readonly Vector3[]): OctahedralPairs {
-  const table = new Float64Array(36);
+  const table = new Array<number>(36).fill(0);
   for (const { first, second, degrees } of sphereAngles(donors)) table[first * 6 + second] = degrees;
   let best = partings[0] as OctahedralPairs;
   let most = -1;

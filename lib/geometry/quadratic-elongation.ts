@@ -1,6 +1,6 @@
 import { cross, dot, subtract } from '../chemistry/linear-algebra';
 import type { Vector3 } from '../chemistry/structure';
-import { octahedralPairs } from './octahedral-pairs';
+import { type OctahedralPairs, octahedralPairs } from './octahedral-pairs';
 
 /** Below this share of the regular volume the sphere is flat, and a regular polyhedron of its volume means nothing. */
 const FLAT = 1e-3;
@@ -9,17 +9,19 @@ const FLAT = 1e-3;
  * Quadratic elongation ⟨λ⟩ = (1/n) Σ (lᵢ/l₀)², l₀ the centre-to-vertex distance of the regular polyhedron of
  * the same volume: V = (4/3) l₀³ for an octahedron, V = (8√3/27) l₀³ for a tetrahedron.
  * @param donors - relative to the metal
+ * @param pairs - the trans pairs of six donors, when known already
  * @returns 1 for the regular polyhedron, larger otherwise; null unless there are four or six donors, and
  * for flat spheres (a square plane encloses no volume)
  * Source: K. Robinson, G. V. Gibbs, P. H. Ribbe, Science 1971, 172, 567. Checked against:
  * tests/published/geometry.test.ts.
  */
-export function quadraticElongation(donors: readonly Vector3[]): number | null {
+export function quadraticElongation(donors: readonly Vector3[], pairs?: OctahedralPairs): number | null {
   const n = donors.length;
   if (n !== 4 && n !== 6) return null;
   const meanSquare = donors.reduce((sum, donor) => sum + dot(donor, donor), 0) / n;
   const perCube = n === 6 ? 4 / 3 : (8 * Math.sqrt(3)) / 27;
-  const volume = n === 6 ? octahedronVolume(donors) : tetrahedronVolume(donors);
+  const volume =
+    n === 6 ? octahedronVolume(donors, pairs ?? octahedralPairs(donors)) : tetrahedronVolume(donors);
   if (!(volume > FLAT * perCube * meanSquare ** 1.5)) return null;
   return meanSquare / (volume / perCube) ** (2 / 3);
 }
@@ -30,8 +32,7 @@ function tetrahedronVolume(donors: readonly Vector3[]): number {
 }
 
 /** Eight tetrahedra from the metal to the faces. */
-function octahedronVolume(donors: readonly Vector3[]): number {
-  const [first, second, third] = octahedralPairs(donors);
+function octahedronVolume(donors: readonly Vector3[], [first, second, third]: OctahedralPairs): number {
   let volume = 0;
   for (const i of first) {
     for (const j of second) {

@@ -11,11 +11,12 @@ export interface SphereAngle {
 /** All donor–metal–donor angles, donors relative to the metal; n(n − 1)/2 of them, by position. */
 export function sphereAngles(donors: readonly Vector3[]): SphereAngle[] {
   const angles: SphereAngle[] = [];
-  donors.forEach((a, first) => {
-    donors.slice(first + 1).forEach((b, offset) => {
-      angles.push({ first, second: first + 1 + offset, degrees: angleDegrees(a, b) });
-    });
-  });
+  for (let first = 0; first < donors.length; first++) {
+    for (let second = first + 1; second < donors.length; second++) {
+      const [a, b] = [donors[first], donors[second]];
+      if (a && b) angles.push({ first, second, degrees: angleDegrees(a, b) });
+    }
+  }
   return angles;
 }
 

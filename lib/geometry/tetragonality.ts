@@ -1,6 +1,6 @@
-import { angleDegrees } from '../chemistry/linear-algebra';
+import { angleDegrees, norm } from '../chemistry/linear-algebra';
 import type { Vector3 } from '../chemistry/structure';
-import { octahedralPairs } from './octahedral-pairs';
+import { type OctahedralPairs, octahedralPairs } from './octahedral-pairs';
 import { sphereAngles } from './sphere-angles';
 
 export interface AxialSplit {
@@ -26,12 +26,17 @@ const STRAIGHT_DEGREES = 150;
  * long contact or two on one line ("4 + 2"): the long contacts are axial.
  * @param donors - relative to the metal, Å
  * @param longContacts - likewise; counted behind the donors in the positions returned
+ * @param pairs - the trans pairs of six donors, when known already
  * @returns null for other spheres
  * Source of the ratio: B. J. Hathaway & D. E. Billing, Coord. Chem. Rev. 1970, 5, 143 (from memory).
  */
-export function axialSplit(donors: readonly Vector3[], longContacts: readonly Vector3[]): AxialSplit | null {
-  const lengths = [...donors, ...longContacts].map((offset) => Math.hypot(...offset));
-  const axial = axialPositions(donors, longContacts, lengths);
+export function axialSplit(
+  donors: readonly Vector3[],
+  longContacts: readonly Vector3[],
+  pairs?: OctahedralPairs,
+): AxialSplit | null {
+  const lengths = [...donors, ...longContacts].map(norm);
+  const axial = axialPositions(donors, longContacts, lengths, pairs);
   if (!axial) return null;
   const members = lengths.map((_, i) => i).filter((i) => i < donors.length || axial.includes(i));
   const equatorial = members.filter((i) => !axial.includes(i));
@@ -55,6 +60,7 @@ function axialPositions(
   donors: readonly Vector3[],
   longContacts: readonly Vector3[],
   lengths: readonly number[],
+  pairs: OctahedralPairs | undefined,
 ): number[] | null {
   if (donors.length === 6) {
     const total = lengths.slice(0, 6).reduce((sum, d) => sum + d, 0);
@@ -62,7 +68,7 @@ function axialPositions(
       const pair = (lengths[i] ?? 0) + (lengths[j] ?? 0);
       return Math.abs(pair / 2 - (total - pair) / 4);
     };
-    return [...([...octahedralPairs(donors)].sort((a, b) => contrast(b) - contrast(a))[0] ?? [])];
+    return [...([...(pairs ?? octahedralPairs(donors))].sort((a, b) => contrast(b) - contrast(a))[0] ?? [])];
   }
   if (donors.length === 5) {
     const [largest, second] = sphereAngles(donors).sort((a, b) => b.degrees - a.degrees);

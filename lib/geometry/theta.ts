@@ -1,6 +1,6 @@
 import { cross, direction, dot, scale, subtract } from '../chemistry/linear-algebra';
 import type { Vector3 } from '../chemistry/structure';
-import { octahedralPairs } from './octahedral-pairs';
+import { type OctahedralPairs, octahedralPairs } from './octahedral-pairs';
 
 /** How Θ is projected here; shown beside every value, since other conventions differ by up to a factor of two. */
 export const THETA_CONVENTION =
@@ -12,14 +12,15 @@ export const THETA_CONVENTION =
  * pseudo-threefold axis, six angles each between neighbouring donors.
  * Convention: see THETA_CONVENTION.
  * @param donors - relative to the metal
+ * @param pairs - their trans pairs, when known already
  * @returns degrees, 0 for an octahedron; null unless there are six donors, or when two opposite faces share
  * their centroid
  * Source: M. Marchivie, P. Guionneau, J.-F. Létard, D. Chasseau, Acta Cryst. 2005, B61, 25. Checked against:
  * tests/published/geometry.test.ts.
  */
-export function thetaDegrees(donors: readonly Vector3[]): number | null {
+export function thetaDegrees(donors: readonly Vector3[], pairs?: OctahedralPairs): number | null {
   if (donors.length !== 6) return null;
-  const [[a, A], [b, B], [c, C]] = octahedralPairs(donors);
+  const [[a, A], [b, B], [c, C]] = pairs ?? octahedralPairs(donors);
   const faces = [
     [a, b, c, A, B, C],
     [a, b, C, A, B, c],
