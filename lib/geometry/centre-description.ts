@@ -2,7 +2,7 @@ import { z } from 'zod';
 
 /**
  * What is known of one metal centre. Stored as a JSON column and printed by the command line. Distances in Å,
- * angles in degrees, indices 0-based. What does not apply is null; `doesNotApply` says why.
+ * angles in degrees, indices 0-based. What does not apply is null; `doesNotApply` (does-not-apply.ts) says why.
  * Distance-based values run over donor atoms, angle-based values and shapes over sites (one per donor atom,
  * one per π-bound group); `coordinationNumber` counts sites.
  */
