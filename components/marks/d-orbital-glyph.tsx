@@ -4,7 +4,12 @@ import { spinWord } from './spin-word';
 
 const BOX = 9;
 /** Box height and gap by number of levels. */
-const rowSizes: Record<number, [height: number, gap: number]> = { 1: [9, 0], 2: [9, 6], 3: [8, 2.5], 4: [7.5, 1.5] };
+const rowSizes: Record<number, [height: number, gap: number]> = {
+  1: [9, 0],
+  2: [9, 6],
+  3: [8, 2.5],
+  4: [7.5, 1.5],
+};
 
 const upArrow = (x: number, y: number, height: number) =>
   `M${x.toFixed(1)} ${y + height - 1.7}V${y + 1.7}l-1.9 2.4`;

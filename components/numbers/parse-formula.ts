@@ -6,7 +6,8 @@ export interface FormulaRun {
 
 const lowered = '₀₁₂₃₄₅₆₇₈₉';
 const raised = '⁰¹²³⁴⁵⁶⁷⁸⁹';
-const isDigit = (character: string | undefined) => character !== undefined && character >= '0' && character <= '9';
+const isDigit = (character: string | undefined) =>
+  character !== undefined && character >= '0' && character <= '9';
 const trueMinus = (text: string) => text.replaceAll('-', '−');
 
 /** Splits into species (joined by spaces or hydrate dots) so that a sign at an end can be told from a hyphen. */
@@ -78,7 +79,10 @@ export function parseFormula(text: string): FormulaRun[] {
       return character === '−' || character === '–' ? '-' : character;
     })
     .join('')
-    .replace(/\^(\d)((?:\^[\d+-])+)/g, (_, first: string, rest: string) => `^${first}${rest.replaceAll('^', '')}`);
+    .replace(
+      /\^(\d)((?:\^[\d+-])+)/g,
+      (_, first: string, rest: string) => `^${first}${rest.replaceAll('^', '')}`,
+    );
   const runs: FormulaRun[] = [];
   for (const piece of splitSpecies(plain)) {
     if (/^[·*•.]$/.test(piece)) {
