@@ -2,6 +2,7 @@
 import { unstable_rethrow } from 'next/navigation';
 import { useActionState } from 'react';
 import { failedForm, idleForm, type FormState } from './form-state';
+import { typedValues } from './typed-values';
 
 export type FormAction = (previous: FormState, form: FormData) => Promise<FormState>;
 
@@ -19,12 +20,4 @@ export function useFormAction(action: FormAction) {
       );
     }
   }, idleForm);
-}
-
-/** The typed values without the passwords, which a form never gets back. */
-function typedValues(form: FormData): Record<string, string> {
-  const values: Record<string, string> = {};
-  for (const [name, value] of form)
-    if (typeof value === 'string' && !name.startsWith('$') && !/password/i.test(name)) values[name] = value;
-  return values;
 }

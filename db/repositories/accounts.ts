@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import type { Knex } from 'knex';
-import { asTenant } from '@/db/knex';
+import { asPerson, asTenant } from '@/db/knex';
 import { insertMemberEvent } from '@/db/repositories/member-events';
 import { err, ok, type Result } from '@/lib/result';
 
@@ -54,14 +54,25 @@ export async function issuePasswordToken(
   ]);
 }
 
-/** Whether a link would still work; does not spend it. */
-export async function isPasswordTokenLive(
+/** Whether the link of the first start would still work; does not spend it. */
+export async function isFirstStartOpen(db: Knex, tokenHash: string): Promise<boolean> {
+  const token = await findToken(db, tokenHash);
+  return token?.purpose === 'first PI' && !(await accountExists(db));
+}
+
+/** Whose password a reset link would set; undefined when it no longer works. Does not spend it. */
+export async function findResetPerson(
   db: Knex,
   tokenHash: string,
-  purpose: PasswordTokenPurpose,
-): Promise<boolean> {
-  const { rows } = await db.raw<{ rows: TokenRow[] }>('select * from find_password_token(?)', [tokenHash]);
-  return rows[0]?.purpose === purpose;
+): Promise<{ userId: string; email: string } | undefined> {
+  const token = await findToken(db, tokenHash);
+  if (token?.purpose !== 'reset' || !token.user_id) return undefined;
+  const userId = token.user_id;
+  return asPerson(db, userId, (trx) =>
+    trx('users')
+      .where({ id: userId })
+      .first<{ userId: string; email: string }>({ userId: 'id', email: 'email' }),
+  );
 }
 
 /** Sets a new password and ends the person's other sessions. */
@@ -89,11 +100,13 @@ export function resetPassword(
 }
 
 /** Spends the link of the first start and creates the first group with its PI, or does neither. */
-export function createFirstGroup(
+export async function createFirstGroup(
   db: Knex,
   tokenHash: string,
   first: { groupName: string; name: string; email: string; passwordHash: string },
-): Promise<Result<{ userId: string; groupId: string }, TokenProblem>> {
+): Promise<Result<{ userId: string; groupId: string }, TokenProblem | 'e-mail taken'>> {
+  // The accounts of an earlier demo stay in the table.
+  if (await findAccountForSignIn(db, first.email)) return err('e-mail taken');
   const groupId = randomUUID();
   return asTenant(db, { groupId, userId: null }, async (trx) => {
     // Two links may be open after two starts; the first one used shuts the door behind it.
@@ -122,13 +135,18 @@ export async function createAccount(
   return userId;
 }
 
+async function findToken(db: Knex, tokenHash: string): Promise<TokenRow | undefined> {
+  const { rows } = await db.raw<{ rows: TokenRow[] }>('select * from find_password_token(?)', [tokenHash]);
+  return rows[0];
+}
+
+/** Of two at once, one gets the row and the other none. */
 async function spendToken(
   trx: Knex.Transaction,
   tokenHash: string,
   purpose: PasswordTokenPurpose,
 ): Promise<TokenRow | undefined> {
-  const live = await isPasswordTokenLive(trx, tokenHash, purpose);
-  if (!live) return undefined;
+  if ((await findToken(trx, tokenHash))?.purpose !== purpose) return undefined;
   const { rows } = await trx.raw<{ rows: TokenRow[] }>('select * from use_password_token(?)', [tokenHash]);
   return rows[0];
 }
