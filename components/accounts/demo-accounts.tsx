@@ -9,11 +9,14 @@ interface DemoAccountsProps {
 /** The accounts of the invented group, one button each. Shown in demo mode only. */
 export function DemoAccounts({ accounts, action, to }: DemoAccountsProps) {
   return (
-    <section aria-labelledby="demo-accounts" className="mt-8 border-t-2 border-ink pt-4">
-      <h2 id="demo-accounts" className="text-group">
+    <section
+      aria-labelledby="demo-accounts"
+      className="max-book:border-t-2 max-book:border-ink max-book:pt-5"
+    >
+      <h2 id="demo-accounts" className="text-section">
         Demo accounts
       </h2>
-      <p className="mt-1 mb-3 text-small text-ink-2">
+      <p className="mt-2 mb-4 text-ink-2">
         This is a demonstration: the group, its people and its measurements are invented, and everybody who
         can open this page can sign in. Keep nothing here.
       </p>

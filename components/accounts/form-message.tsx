@@ -3,7 +3,7 @@ import type { FormState } from './form-state';
 /** The outcome of a form, spoken as soon as it is there. */
 export function FormMessage({ state }: { state: Pick<FormState, 'status' | 'message'> }) {
   return (
-    <div aria-live="polite">
+    <div aria-live="polite" className="empty:absolute">
       {state.message ? (
         <p
           className={

@@ -11,9 +11,9 @@ export function InviteForm({ action, roles }: { action: FormAction; roles: reado
   const [state, submit] = useFormAction(action);
   const roleId = useId();
   return (
-    <form action={submit} className="max-w-[720px]">
+    <form action={submit} className="grid gap-4">
       <FormMessage state={state} />
-      <div className="grid items-start gap-4 book:grid-cols-[1fr_220px_max-content]">
+      <div className="grid items-start gap-4 book:grid-cols-2">
         <TextField
           label="E-mail"
           name="email"
@@ -36,7 +36,7 @@ export function InviteForm({ action, roles }: { action: FormAction; roles: reado
             defaultValue={state.values.role ?? 'experimentalist'}
           />
         </div>
-        <div className="book:pt-[1.45rem]">
+        <div>
           <SubmitButton pending="Sending …">Send invitation</SubmitButton>
         </div>
       </div>

@@ -27,11 +27,14 @@ interface MemberTableProps {
 /** Everybody in the group, with what may be changed about them. */
 export function MemberTable({ members, roles, changeRole, remove }: MemberTableProps) {
   return (
-    <ul aria-label="Members" className="border-b border-rule">
+    <ul
+      aria-label="Members"
+      className="border-b border-rule border-t-2 border-t-ink [&>li:first-child]:border-t-0"
+    >
       {members.map((member) => (
         <li
           key={member.userId}
-          className="grid items-start gap-x-6 gap-y-3 border-t border-rule py-3 book:grid-cols-[minmax(0,1fr)_minmax(0,26rem)]"
+          className="grid items-start gap-x-6 gap-y-3 border-t border-rule py-3 book:grid-cols-[minmax(0,1fr)_minmax(0,22rem)]"
         >
           <div className="min-w-0">
             <p className="text-lead">

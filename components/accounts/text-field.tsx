@@ -22,7 +22,7 @@ export function TextField({ label, hint, problem, ...input }: TextFieldProps) {
         id={id}
         aria-invalid={problem ? true : undefined}
         aria-describedby={said || undefined}
-        className={`w-full border-0 border-b bg-page-sunk px-2 py-2 text-body text-ink ${problem ? 'border-b-2 border-dissent' : 'border-rule-strong'}`}
+        className={`w-full border-0 border-b bg-page-sunk px-2 min-h-10 text-body text-ink ${problem ? 'border-b-2 border-dissent' : 'border-rule-strong'}`}
       />
       {problem ? (
         <p id={`${id}-problem`} className="text-small text-dissent">

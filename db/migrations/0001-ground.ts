@@ -448,16 +448,22 @@ export async function up(knex: Knex): Promise<void> {
             select u.id, u.name, u.email, u.demo from sessions s join users u on u.id = s.user_id
             where s.id = session and s.revoked_at is null and s.expires_at > now() $$;
 
-    -- Counts one more attempt and returns how many the current window holds.
+    -- Counts one more attempt and returns how many the current window holds. Old rows are swept after the
+    -- count and past locked ones, so that two callers never wait for each other's rows.
     create function count_attempt(wanted text, window_seconds integer) returns integer
-      language sql security definer set search_path = public
-      as $$ delete from attempts where window_ends_at < now() and key <> wanted;
-            insert into attempts as a (key, count, window_ends_at)
-              values (wanted, 1, now() + make_interval(secs => window_seconds))
-            on conflict (key) do update set
-              count = case when a.window_ends_at < now() then 1 else a.count + 1 end,
-              window_ends_at = case when a.window_ends_at < now() then excluded.window_ends_at else a.window_ends_at end
-            returning count $$;
+      language plpgsql security definer set search_path = public
+      as $$ declare counted integer; begin
+              insert into attempts as a (key, count, window_ends_at)
+                values (wanted, 1, now() + make_interval(secs => window_seconds))
+              on conflict (key) do update set
+                count = case when a.window_ends_at < now() then 1 else a.count + 1 end,
+                window_ends_at =
+                  case when a.window_ends_at < now() then excluded.window_ends_at else a.window_ends_at end
+              returning a.count into counted;
+              delete from attempts where key in (
+                select key from attempts where window_ends_at < now() for update skip locked limit 50);
+              return counted;
+            end $$;
 
     create function forget_attempts(wanted text) returns void
       language sql security definer set search_path = public

@@ -23,21 +23,23 @@ export default async function SignInPage({ searchParams }: PageProps<'/sign-in'>
   const target = returnPath(typeof to === 'string' ? to : null);
   if (await currentPerson()) redirect(target);
   const said = typeof notice === 'string' ? (notices[notice] ?? null) : null;
-  return (
-    <>
+  const entrance = (
+    <div>
       <h1 className="mb-6 text-title">Sign in</h1>
-      <FormMessage state={{ status: 'done', message: said }} />
-      <SignInForm action={signIn} to={target} />
+      <div className="grid gap-5">
+        <FormMessage state={{ status: 'done', message: said }} />
+        <SignInForm action={signIn} to={target} />
+      </div>
       <p className="mt-5 text-small">
         <Link href="/reset-password">Forgotten the password?</Link>
       </p>
-      {isDemoMode() ? (
-        <DemoAccounts
-          accounts={demoAccounts.map(({ name, email, role, password }) => ({ name, email, role, password }))}
-          action={signInAsDemo}
-          to={target}
-        />
-      ) : null}
-    </>
+    </div>
+  );
+  if (!isDemoMode()) return entrance;
+  return (
+    <div data-spread className="grid gap-x-14 gap-y-10 book:grid-cols-[minmax(0,4fr)_minmax(0,5fr)]">
+      {entrance}
+      <DemoAccounts accounts={demoAccounts} action={signInAsDemo} to={target} />
+    </div>
   );
 }
