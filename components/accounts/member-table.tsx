@@ -47,7 +47,7 @@ export function MemberTable({ members, roles, changeRole, remove }: MemberTableP
           </div>
           {changeRole && remove ? (
             <div className="grid gap-2">
-              <RoleForm key={member.role} member={member} roles={roles} action={changeRole} />
+              <RoleForm member={member} roles={roles} action={changeRole} />
               <RemoveMember member={member} action={remove} />
             </div>
           ) : (
@@ -73,7 +73,12 @@ function RoleForm({
     <form action={submit} className="grid gap-2">
       <input type="hidden" name="userId" value={member.userId} />
       <div className="flex gap-2">
-        <RoleSelect roles={roles} defaultValue={member.role} aria-label={`Role of ${member.name}`} />
+        <RoleSelect
+          key={member.role}
+          roles={roles}
+          defaultValue={member.role}
+          aria-label={`Role of ${member.name}`}
+        />
         <SubmitButton kind="plain" pending="Changing …">
           <span className="whitespace-nowrap">Change role</span>
         </SubmitButton>

@@ -25,7 +25,7 @@ export function TextField({ label, hint, problem, ...input }: TextFieldProps) {
         className={`w-full border-0 border-b bg-page-sunk px-2 min-h-10 text-body text-ink ${problem ? 'border-b-2 border-dissent' : 'border-rule-strong'}`}
       />
       {problem ? (
-        <p id={`${id}-problem`} className="text-small text-dissent">
+        <p id={`${id}-problem`} role="alert" className="text-small text-dissent">
           {problem}
         </p>
       ) : null}
