@@ -76,6 +76,14 @@ export async function up(knex: Knex): Promise<void> {
       accepted_at timestamptz,
       withdrawn_at timestamptz
     );
+    -- One open invitation per address and group: inviting again replaces the link.
+    create unique index on invitations (group_id, email) where accepted_at is null and withdrawn_at is null;
+    -- How often something was tried in the current window, such as signing in to one address.
+    create table attempts (
+      key text primary key check (length(key) <= 400),
+      count integer not null,
+      window_ends_at timestamptz not null
+    );
 
     create table studies (
       id uuid primary key default gen_random_uuid(),
@@ -399,26 +407,31 @@ export async function up(knex: Knex): Promise<void> {
     alter table sessions enable row level security;
     create policy own_sessions on sessions using (user_id = app_user()) with check (user_id = app_user());
     alter table password_tokens enable row level security;
+    alter table attempts enable row level security;
 
     create function account_for_sign_in(wanted text)
-      returns table (id uuid, name text, email text, password_hash text)
+      returns table (id uuid, name text, email text, password_hash text, demo boolean)
       language sql stable security definer set search_path = public
-      as $$ select id, name, email, password_hash from users where email = lower(wanted) $$;
+      as $$ select id, name, email, password_hash, demo from users where email = lower(wanted) $$;
 
+    -- Demo accounts do not count: outside demo mode nobody can sign in with them.
     create function account_exists() returns boolean
       language sql stable security definer set search_path = public
-      as $$ select exists (select 1 from users) $$;
+      as $$ select exists (select 1 from users where not demo) $$;
 
     create function create_account(new_email text, new_name text, new_hash text, is_demo boolean) returns uuid
       language sql security definer set search_path = public
       as $$ insert into users (email, name, password_hash, demo)
             values (lower(new_email), new_name, new_hash, is_demo) returning id $$;
 
-    -- Setting a password ends every session of that person.
-    create function set_password(person uuid, new_hash text) returns void
+    -- Setting a password ends every session of that person, save the one it was changed from,
+    -- and spends every reset link that is still open.
+    create function set_password(person uuid, new_hash text, kept_session uuid) returns void
       language sql security definer set search_path = public
       as $$ update users set password_hash = new_hash where id = person;
-            update sessions set revoked_at = now() where user_id = person and revoked_at is null $$;
+            update password_tokens set used_at = now() where user_id = person and used_at is null;
+            update sessions set revoked_at = now()
+              where user_id = person and revoked_at is null and id is distinct from kept_session $$;
 
     create function issue_password_token(hash text, person uuid, wanted_purpose text, until timestamptz) returns void
       language sql security definer set search_path = public
@@ -437,11 +450,36 @@ export async function up(knex: Knex): Promise<void> {
             where t.token_hash = hash and t.used_at is null and t.expires_at > now()
             returning t.user_id, t.purpose $$;
 
-    create function live_session(session uuid) returns table (user_id uuid, name text, email text)
+    -- Asked on every request, so it writes at most once a minute.
+    create function live_session(session uuid) returns table (user_id uuid, name text, email text, demo boolean)
       language sql security definer set search_path = public
-      as $$ update sessions s set seen_at = now() from users u
-            where s.id = session and u.id = s.user_id and s.revoked_at is null and s.expires_at > now()
-            returning u.id, u.name, u.email $$;
+      as $$ with seen as (
+              update sessions set seen_at = now()
+              where id = session and revoked_at is null and expires_at > now()
+                and seen_at < now() - interval '1 minute')
+            select u.id, u.name, u.email, u.demo from sessions s join users u on u.id = s.user_id
+            where s.id = session and s.revoked_at is null and s.expires_at > now() $$;
+
+    -- Counts one more attempt and returns how many the current window holds. Old rows are swept after the
+    -- count and past locked ones, so that two callers never wait for each other's rows.
+    create function count_attempt(wanted text, window_seconds integer) returns integer
+      language plpgsql security definer set search_path = public
+      as $$ declare counted integer; begin
+              insert into attempts as a (key, count, window_ends_at)
+                values (wanted, 1, now() + make_interval(secs => window_seconds))
+              on conflict (key) do update set
+                count = case when a.window_ends_at < now() then 1 else a.count + 1 end,
+                window_ends_at =
+                  case when a.window_ends_at < now() then excluded.window_ends_at else a.window_ends_at end
+              returning a.count into counted;
+              delete from attempts where key in (
+                select key from attempts where window_ends_at < now() for update skip locked limit 50);
+              return counted;
+            end $$;
+
+    create function forget_attempts(wanted text) returns void
+      language sql security definer set search_path = public
+      as $$ delete from attempts where key = wanted $$;
 
     create function start_session(person uuid, agent text, until timestamptz) returns uuid
       language sql security definer set search_path = public
