@@ -40,7 +40,11 @@ export interface NewStructure {
 }
 
 /** Saves a structure and its centres; what an earlier reading of the same bytes left is replaced. */
-export async function saveStructure(trx: Knex.Transaction, tenant: Tenant, structure: NewStructure): Promise<string> {
+export async function saveStructure(
+  trx: Knex.Transaction,
+  tenant: Tenant,
+  structure: NewStructure,
+): Promise<string> {
   const { centres, elements, positionsAngstrom, ...values } = structure;
   const [row] = await trx('structures')
     .insert({
@@ -75,7 +79,11 @@ export async function saveStructure(trx: Knex.Transaction, tenant: Tenant, struc
 }
 
 /** A reading that found no geometry any more: the structure an earlier reader saw is taken back. */
-export async function removeStructureOfRun(trx: Knex.Transaction, tenant: Tenant, runId: string): Promise<void> {
+export async function removeStructureOfRun(
+  trx: Knex.Transaction,
+  tenant: Tenant,
+  runId: string,
+): Promise<void> {
   await trx('structures').where({ groupId: tenant.groupId, runId }).delete();
 }
 
@@ -102,7 +110,9 @@ export async function setStructureComplex(
   of: { runId: string } | { id: string },
   complexId: string | null,
 ): Promise<void> {
-  await trx('structures').where({ groupId: tenant.groupId, ...of }).update({ complexId });
+  await trx('structures')
+    .where({ groupId: tenant.groupId, ...of })
+    .update({ complexId });
 }
 
 /** The numbers of one centre that a table of the study shows. */
@@ -156,13 +166,29 @@ async function withCentres(
     .where({ groupId: tenant.groupId, ...where })
     .orderBy(['title', 'id'])
     .select<Omit<StoredStructure, 'centres'>[]>(
-      'id', 'runId', 'complexId', 'sha256', 'frame', 'title', 'formula', 'elements', 'positionsAngstrom',
+      'id',
+      'runId',
+      'complexId',
+      'sha256',
+      'frame',
+      'title',
+      'formula',
+      'elements',
+      'positionsAngstrom',
     );
   const centres = await trx('centres')
     .where({ groupId: tenant.groupId })
-    .whereIn('structureId', structures.map(({ id }) => id))
+    .whereIn(
+      'structureId',
+      structures.map(({ id }) => id),
+    )
     .orderBy('atomIndex')
-    .select<(StoredCentre & { structureId: string })[]>('structureId', 'atomIndex', 'spinPopulation', 'description');
+    .select<(StoredCentre & { structureId: string })[]>(
+      'structureId',
+      'atomIndex',
+      'spinPopulation',
+      'description',
+    );
   return structures.map((structure) => ({
     ...structure,
     centres: centres

@@ -205,5 +205,14 @@ export async function insertReceivedFile(
   }
   const { sha256, bytes, kind } = received;
   const { known } = await ensureFile(trx, tenant, { sha256, bytes });
-  return insertUpload(trx, tenant, { ...drop, fileName, sha256, bytes, kind, state: 'queued', known, problem: null });
+  return insertUpload(trx, tenant, {
+    ...drop,
+    fileName,
+    sha256,
+    bytes,
+    kind,
+    state: 'queued',
+    known,
+    problem: null,
+  });
 }

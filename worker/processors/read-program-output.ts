@@ -6,7 +6,13 @@ import { asTenant } from '@/db/knex';
 import { insertEvent } from '@/db/repositories/events';
 import { setLineIndex } from '@/db/repositories/files';
 import { saveRun } from '@/db/repositories/runs';
-import { failReading, finishReading, setBytesRead, type Upload, type UploadProblem } from '@/db/repositories/uploads';
+import {
+  failReading,
+  finishReading,
+  setBytesRead,
+  type Upload,
+  type UploadProblem,
+} from '@/db/repositories/uploads';
 import { matchRun } from './match-run';
 import type { ReadContext } from './read-context';
 import { saveRunGeometry } from './save-run-geometry';
@@ -25,11 +31,18 @@ export async function readProgramOutput(
     if (record.program === null) {
       return failReading(trx, tenant, upload.id, {
         code: 'unknown',
-        message: 'no line of this file says which program wrote it; send the whole output, from its banner on',
+        message:
+          'no line of this file says which program wrote it; send the whole output, from its banner on',
       });
     }
     await setLineIndex(trx, tenant, sha256, { every: LINES_PER_OFFSET, offsets: lineOffsets });
-    const run = await saveRun(trx, tenant, { studyId, sha256, fileName, readerVersion: READER_VERSION, record });
+    const run = await saveRun(trx, tenant, {
+      studyId,
+      sha256,
+      fileName,
+      readerVersion: READER_VERSION,
+      record,
+    });
     const centres = await saveRunGeometry(trx, tenant, { studyId, runId: run.id, sha256, fileName, record });
     // A match that a person made stays; one that was found is found again, for the record may say more now.
     if (run.matchedBy !== 'hand') await matchRun(trx, tenant, { studyId, runId: run.id, record, centres });

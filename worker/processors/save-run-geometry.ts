@@ -12,12 +12,12 @@ export async function saveRunGeometry(
   tenant: Tenant,
   run: { studyId: string; runId: string; sha256: string; fileName: string; record: OutputRecord },
 ): Promise<CentreDescription[]> {
-  const { geometry, multiplicity } = run.record;
+  const { geometry } = run.record;
   if (!geometry || geometry.elements.length === 0) {
     await removeStructureOfRun(trx, tenant, run.runId);
     return [];
   }
-  const centres = describeCentres(geometry, { spinMultiplicity: multiplicity });
+  const centres = describeCentres(geometry);
   await saveStructure(trx, tenant, {
     studyId: run.studyId,
     runId: run.runId,
