@@ -61,7 +61,7 @@ describe('donors and long contacts', () => {
       [0, 0, last],
     ];
     expect(only(sphereStructure('Zn', 'O', donors(2.45))).notation).toBe('4');
-    expect(only(sphereStructure('Zn', 'O', donors(2.6))).notation).toBe('3 + 1');
+    expect(only(sphereStructure('Zn', 'O', donors(2.7))).notation).toBe('3 + 1');
   });
 
   it('uses the radius of the spin state that is given', () => {
@@ -107,6 +107,26 @@ describe('donors and long contacts', () => {
     );
     expect(centre.donors.map((donor) => donor.index)).toEqual([2, 3, 4]);
     expect(JSON.stringify(centre)).not.toContain('NaN');
+  });
+});
+
+describe('crowded donors', () => {
+  it('are all counted when two of them come close without being bonded', () => {
+    // N···N 1.68 Å: within the usual tolerance of a bond, too long for one; the second nitrogen is 0.4 Å farther out.
+    const donors: Vector3[] = [
+      [1.8, 0, 0],
+      [1.63, 1.67, 0],
+      [-2, 0, 0],
+      [0, -2, 0],
+    ];
+    expect(only(sphereStructure('Mn', 'N', donors)).coordinationNumber).toBe(4);
+  });
+
+  it('lose the far atom of an end-on ligand', () => {
+    const centre = only(
+      structure(['Mn', 0, 0, 0], ['O', 1.9, 0, 0], ['O', 2.35, 1.25, 0], ['Cl', -2.3, 0, 0]),
+    );
+    expect(centre.donors.map((donor) => donor.index)).toEqual([1, 3]);
   });
 });
 
