@@ -20,6 +20,9 @@ const MOST_VERTICES = 9;
  */
 const DOUBLE_ROOT = 1e-3;
 
+/** A pairing counts as better from this factor on: equally good ones are not solved again. 2e-8 in S. */
+const BETTER = 1 + 1e-10;
+
 interface Prepared {
   tree: readonly PairingStep[] | null;
   /** Σ of the vertices. */
@@ -160,7 +163,7 @@ function bestPairing(
     h8: number,
   ): void => {
     if (k === n || (k > 2 && k < n - 1 && best > 0)) {
-      const bound = best - rest[k]!;
+      const bound = best * BETTER - rest[k]!;
       const f = h0 * h0 + h1 * h1 + h2 * h2 + h3 * h3 + h4 * h4 + h5 * h5 + h6 * h6 + h7 * h7 + h8 * h8;
       const c0 = h4 * h8 - h5 * h7;
       const c1 = h5 * h6 - h3 * h8;

@@ -9,7 +9,7 @@ export const SPHERE_TOLERANCES = {
   /** A donor lies within the sum of radii + this. */
   donor: 0.45,
   /** Beyond it a donor must follow the one before without a gap … */
-  gap: 0.2,
+  gap: 0.3,
   /** … and within the sum of (smaller) radii + this. */
   stretchedDonor: 0.75,
   /** A long contact lies within the sum of (smaller) radii + this. */
@@ -19,6 +19,9 @@ export const SPHERE_TOLERANCES = {
 } as const;
 /** A long contact keeps at least this angle from every donor. Common practice. */
 const LONG_CONTACT_ANGLE_DEGREES = 50;
+
+/** A bond that counts for "behind a donor" exceeds the sum of radii by no more than this. Common practice. */
+const SHORT_BOND_TOLERANCE = 0.15;
 
 /** Elements with a lone pair to give: only these are long contacts or stretched donors. */
 const lonePairElements = new Set(['N', 'O', 'F', 'P', 'S', 'Cl', 'As', 'Se', 'Br', 'Te', 'I']);
@@ -65,7 +68,7 @@ interface Candidate extends SphereContact {
 /**
  * The coordination sphere of every metal of a structure.
  * A donor is a non-metal within the sum of covalent radii + 0.45 Å. Farther lone-pair atoms follow as long as
- * no gap above 0.2 Å opens, so that a stretched bond is not cut off by a line on the ruler. Left out: atoms
+ * no gap above 0.3 Å opens, so that a stretched bond is not cut off by a line on the ruler. Left out: atoms
  * behind a donor (bonded to one and 0.2 Å farther out, such as the carbon of a chelating carboxylate) and
  * hydrogens, save hydrides (bonded to no non-metal but hydrogen or boron).
  * Beyond the sphere, lone-pair atoms that are not bonded to a donor and keep 50° from every donor are long
@@ -91,7 +94,7 @@ export function findSpheres(
   return metals.map((index) => {
     const { candidates, metalContacts } = contacts.get(index) ?? { candidates: [], metalContacts: [] };
     candidates.sort((a, b) => a.excess - b.excess || a.index - b.index);
-    const found = chooseDonors(candidates, graph, elements);
+    const found = chooseDonors(candidates, graph, structure);
     const donors = changeDonors(structure, index, found, changes.get(index));
     const removed = new Set(changes.get(index)?.remove);
     const longContacts = chooseLongContacts(structure, graph.neighbours, index, donors, candidates).filter(
@@ -163,12 +166,9 @@ function contactsOf(structure: Structure, metals: readonly number[], options: Sp
 }
 
 /** @param candidates - by ascending excess */
-function chooseDonors(
-  candidates: readonly Candidate[],
-  graph: BondGraph,
-  elements: readonly string[],
-): Candidate[] {
+function chooseDonors(candidates: readonly Candidate[], graph: BondGraph, structure: Structure): Candidate[] {
   const { neighbours } = graph;
+  const { elements } = structure;
   const donors: Candidate[] = [];
   const excessOf = new Map<number, number>();
   let farthest = -Infinity;
@@ -185,7 +185,11 @@ function chooseDonors(
     }
     const behind = (neighbours[index] ?? []).some((neighbour) => {
       const nearer = excessOf.get(neighbour);
-      return nearer !== undefined && excess - nearer > SPHERE_TOLERANCES.behindDonor;
+      return (
+        nearer !== undefined &&
+        excess - nearer > SPHERE_TOLERANCES.behindDonor &&
+        isShortBond(structure, index, neighbour)
+      );
     });
     if (behind) continue;
     donors.push(candidate);
@@ -193,6 +197,20 @@ function chooseDonors(
     farthest = excess;
   }
   return donors;
+}
+
+/**
+ * Whether two neighbours are surely bonded: crowded donors of a distorted sphere may come within the usual
+ * tolerance of a bond without belonging to one ligand.
+ */
+function isShortBond(structure: Structure, a: number, b: number): boolean {
+  const [first, second] = [structure.positionsAngstrom[a], structure.positionsAngstrom[b]];
+  const radii = [a, b].map((atom) => covalentRadiusAngstrom(structure.elements[atom] ?? '') ?? 0);
+  return (
+    first !== undefined &&
+    second !== undefined &&
+    distance(first, second) <= (radii[0] ?? 0) + (radii[1] ?? 0) + SHORT_BOND_TOLERANCE
+  );
 }
 
 function isHydride(index: number, graph: BondGraph, elements: readonly string[]): boolean {

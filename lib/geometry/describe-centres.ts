@@ -17,7 +17,7 @@ import { type OctahedralPairs, octahedralPairs } from './octahedral-pairs';
 import { planeDisplacement } from './plane-displacement';
 import { quadraticElongation } from './quadratic-elongation';
 import { sigmaDegrees } from './sigma';
-import { sphereAngles } from './sphere-angles';
+import { type SphereAngle, sphereAngles } from './sphere-angles';
 import { sphereShapes } from './sphere-shapes';
 import { tau4 } from './tau4';
 import { tau4Prime } from './tau4-prime';
@@ -47,8 +47,11 @@ export function describeCentres(structure: Structure, options: DescribeOptions =
   const spheres = findSpheres(structure, graph, options);
   const centresOf = new Map<number, number[]>();
   for (const sphere of spheres) {
-    for (const { index } of sphere.donors)
-      centresOf.set(index, [...(centresOf.get(index) ?? []), sphere.index]);
+    for (const { index } of sphere.donors) {
+      const centres = centresOf.get(index);
+      if (centres) centres.push(sphere.index);
+      else centresOf.set(index, [sphere.index]);
+    }
   }
   return spheres.map((sphere) => describeCentre(structure, graph, sphere, centresOf, options));
 }
@@ -77,7 +80,8 @@ function describeCentre(
   const longOffsets = longContacts.map(
     (contact): Vector3 => subtract(structure.positionsAngstrom[contact.index] ?? metalAt, metalAt),
   );
-  const pairs = offsets.length === 6 ? octahedralPairs(offsets) : undefined;
+  const angles = offsets.length <= MOST_SITES_WITH_ANGLES ? sphereAngles(offsets) : [];
+  const pairs = offsets.length === 6 ? octahedralPairs(offsets, angles) : undefined;
   const split = axialSplit(offsets, longOffsets, pairs);
   const plane = planeDisplacement(offsets, split);
   const shapes = sphereShapes(offsets);
@@ -94,7 +98,9 @@ function describeCentre(
       longContacts.length > 0 ? `${coordinationNumber} + ${longContacts.length}` : String(coordinationNumber),
     spinStateUsed: spinMatters ? spinState : null,
     donors: donors.map((donor) => ({
-      ...donor,
+      element: donor.element,
+      index: donor.index,
+      distanceAngstrom: donor.distanceAngstrom,
       bridgesTo: (centresOf.get(donor.index) ?? []).filter((centre) => centre !== index),
       addedByHand: change?.add.includes(donor.index) ?? false,
     })),
@@ -111,7 +117,7 @@ function describeCentre(
     meansByElement: distancesByElement(donors),
     baurDistortion: baurDistortion(distances),
     meanSquareDistortion: meanSquareDistortion(distances),
-    angles: listAngles(offsets, pairs),
+    angles: listAngles(angles, pairs),
     chelates,
     axial: split && {
       ...split,
@@ -141,13 +147,13 @@ function describeCentre(
 }
 
 function listAngles(
-  offsets: readonly Vector3[],
+  angles: readonly SphereAngle[],
   pairs: OctahedralPairs | undefined,
 ): CentreDescription['angles'] {
-  if (offsets.length > MOST_SITES_WITH_ANGLES) return [];
-  return sphereAngles(offsets).map(({ first, second, degrees }) => ({
+  const mate = new Map(pairs);
+  return angles.map(({ first, second, degrees }) => ({
     sites: [first, second],
     angleDegrees: degrees,
-    trans: pairs ? pairs.some(([i, j]) => i === first && j === second) : degrees > TRANS_DEGREES,
+    trans: pairs ? mate.get(first) === second : degrees > TRANS_DEGREES,
   }));
 }

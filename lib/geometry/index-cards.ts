@@ -261,7 +261,7 @@ export const indexCards: Record<IndexKey, IndexCard> = {
       { value: 'off by more than 0.5', meaning: 'does not support it' },
     ],
     limits:
-      'Needs a parameter for every donor element. Calculated distances that are too long lower the sum.',
+      'Needs a parameter for every donor element. Calculated distances that are too long lower the sum. The parameters fit high-spin ions: low-spin centres with their short bonds give sums above their state.',
     convention: 'Donors of the first sphere; the sum with long contacts stands beside it.',
   },
   ionicRadiusSums: {

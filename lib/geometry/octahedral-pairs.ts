@@ -34,10 +34,11 @@ const partings: readonly OctahedralPairs[] = [1, 2, 3, 4, 5].flatMap((mate) => {
  * The three trans pairs of six donors: the parting with the largest sum of angles. In an octahedron
  * these are the opposite vertices; towards a trigonal prism the choice stays the best there is.
  * @param donors - six positions relative to the metal
+ * @param angles - their angles, when known already
  */
-export function octahedralPairs(donors: readonly Vector3[]): OctahedralPairs {
+export function octahedralPairs(donors: readonly Vector3[], angles = sphereAngles(donors)): OctahedralPairs {
   const table = new Array<number>(36).fill(0);
-  for (const { first, second, degrees } of sphereAngles(donors)) table[first * 6 + second] = degrees;
+  for (const { first, second, degrees } of angles) table[first * 6 + second] = degrees;
   let best = partings[0] as OctahedralPairs;
   let most = -1;
   for (const parting of partings) {
