@@ -77,7 +77,6 @@ function drawSphere(viewer: GLViewer, structure: ViewedStructure, labels: Viewer
       backgroundColor: page,
       backgroundOpacity: 0.82,
       borderThickness: 0,
-      padding: 1,
       inFront: true,
       alignment: 'center',
     });
