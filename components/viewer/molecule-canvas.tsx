@@ -33,6 +33,17 @@ function hasWebGl(): boolean {
   return canvas.getContext('webgl2') !== null || canvas.getContext('webgl') !== null;
 }
 
+/** The library leaves wide margins around small structures: step nearer to those. */
+function openingZoom({ positionsAngstrom }: ViewedStructure): number {
+  const reach = Math.max(
+    ...[0, 1, 2].map((axis) => {
+      const values = positionsAngstrom.map((position) => position[axis] ?? 0);
+      return Math.max(...values) - Math.min(...values);
+    }),
+  );
+  return reach < 5 ? 1.7 : reach < 8 ? 1.25 : 1;
+}
+
 function drawAtoms(viewer: GLViewer, structure: ViewedStructure, picked: number | null) {
   const bonded = new Map<number, number[]>();
   for (const [a, b] of drawnBonds(structure)) {
@@ -73,9 +84,9 @@ function drawSphere(viewer: GLViewer, structure: ViewedStructure, labels: Viewer
       position,
       fontColor,
       fontSize,
-      font: 'Source Sans 3 Variable',
+      font: '"Source Sans 3 Variable"',
       backgroundColor: page,
-      backgroundOpacity: 0.82,
+      backgroundOpacity: 0.92,
       borderThickness: 0,
       inFront: true,
       alignment: 'center',
@@ -129,10 +140,10 @@ export default function MoleculeCanvas({
 }: MoleculeCanvasProps) {
   const frame = useRef<HTMLDivElement>(null);
   const viewer = useRef<GLViewer | null>(null);
-  const draw = useRef<() => void>(() => undefined);
+  const draw = useRef<(opening?: boolean) => void>(() => undefined);
 
   useEffect(() => {
-    draw.current = () => {
+    draw.current = (opening = false) => {
       const [current, element] = [viewer.current, frame.current];
       if (current === null || element === null) return;
       const view = current.getView();
@@ -144,7 +155,16 @@ export default function MoleculeCanvas({
       current.setClickable({}, true, (atom: AtomSpec) => {
         if (atom.index !== undefined) onPick(atom.index);
       });
-      current.setView(view);
+      // An opaque ground: on a transparent canvas the labels' own paper would fade with it.
+      current.setBackgroundColor(resolveColour('page', element), 1);
+      if (opening) {
+        current.rotate(28, 'y');
+        current.rotate(12, 'x');
+        current.zoomTo();
+        current.zoom(openingZoom(structure));
+      } else {
+        current.setView(view);
+      }
       current.render();
     };
     draw.current();
@@ -165,18 +185,13 @@ export default function MoleculeCanvas({
     const start = async () => {
       const { createViewer } = await import('3dmol');
       if (left) return;
-      const current = createViewer(element, { backgroundAlpha: 0, antialias: true, disableFog: true });
+      const current = createViewer(element, { antialias: true, disableFog: true });
       if (current === undefined || current === null) {
         onUnable();
         return;
       }
       viewer.current = current;
-      draw.current();
-      current.rotate(28, 'y');
-      current.rotate(12, 'x');
-      current.zoomTo();
-      current.zoom(0.86);
-      current.render();
+      draw.current(true);
       const home = current.getView();
       onReady({
         rotate: (degrees, axis) => current.rotate(degrees, axis),
