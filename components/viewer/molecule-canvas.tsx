@@ -5,7 +5,13 @@ import type { AtomSpec, GLViewer } from '3dmol';
 import { atomColour } from './atom-colours';
 import type { ViewerLabels } from './flat-projection';
 import { resolveColour } from './resolve-colour';
-import { atomNames, drawnBonds, sphereAngles, type ViewedStructure } from './viewed-structure';
+import {
+  atomNames,
+  distanceAngstrom,
+  drawnBonds,
+  sphereAngles,
+  type ViewedStructure,
+} from './viewed-structure';
 
 /** What the buttons and keys around the canvas can do. */
 export interface CanvasControls {
@@ -99,6 +105,11 @@ function drawSphere(viewer: GLViewer, structure: ViewedStructure, labels: Viewer
       y: metal[1] + (to[1] - metal[1]) * share,
       z: metal[2] + (to[2] - metal[2]) * share,
     });
+    // 1.15 Å from the metal, between the two donors; of opposite donors there is no between.
+    const outside = (middle: readonly [number, number, number]) => {
+      const length = distanceAngstrom(metal, middle);
+      return between(middle, length < 0.2 ? 1 : 1.15 / length);
+    };
     for (const donor of centre.donors) {
       const end = structure.positionsAngstrom[donor.index];
       if (end === undefined) continue;
@@ -118,7 +129,7 @@ function drawSphere(viewer: GLViewer, structure: ViewedStructure, labels: Viewer
         const [a, b] = [structure.positionsAngstrom[first], structure.positionsAngstrom[second]];
         if (a === undefined || b === undefined) continue;
         const middle = [(a[0] + b[0]) / 2, (a[1] + b[1]) / 2, (a[2] + b[2]) / 2] as const;
-        label(`${degrees.toFixed(1)}°`, between(middle, 0.62), ink2, 12);
+        label(`${degrees.toFixed(1)}°`, outside(middle), ink2, 12);
       }
     }
   }
