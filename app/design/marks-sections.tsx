@@ -124,7 +124,12 @@ export function MarksSections() {
         title="d-orbital glyphs"
         note="The icon of a candidate. Rows are levels, lowest at the bottom."
       >
-        <div className="overflow-x-auto" role="region" aria-label="Fillings by field and d count" tabIndex={0}>
+        <div
+          className="overflow-x-auto"
+          role="region"
+          aria-label="Fillings by field and d count"
+          tabIndex={0}
+        >
           <table>
             <thead>
               <tr>
