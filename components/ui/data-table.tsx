@@ -20,7 +20,7 @@ export function DataTable({
     // A frame that can scroll must be reachable by keyboard (WCAG 2.1.1).
     <div
       className="relative overflow-x-auto"
-      role="region"
+      role="group"
       aria-label={typeof caption === 'string' ? caption : undefined}
       tabIndex={0}
     >
