@@ -32,7 +32,7 @@ export function CandidateTable({
   rows: readonly CandidateTableRow[];
 }) {
   return (
-    <DataTable caption={caption}>
+    <DataTable caption={caption} className="max-wide:table-fixed max-book:text-small">
       <thead>
         <tr>
           <td />

@@ -26,10 +26,11 @@ export function IndexTabs({ label = 'Study', tabs }: { label?: string; tabs: rea
         >
           {tab.label}
           {tab.count === undefined || tab.count.value === 0 ? null : (
-            <span className="ml-[5px] text-note font-bold text-dissent">
-              {tab.count.value}
-              <VisuallyHidden> {tab.count.word}</VisuallyHidden>
-            </span>
+            <>
+              {/* The spaces part the words of the link's name for screen readers. */}{' '}
+              <span className="text-note font-bold text-dissent">{tab.count.value}</span>{' '}
+              <VisuallyHidden>{tab.count.word}</VisuallyHidden>
+            </>
           )}
         </Link>
       ))}

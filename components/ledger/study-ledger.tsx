@@ -40,7 +40,7 @@ export function StudyLedger({
   });
   const count = groups.reduce((sum, group) => sum + group.rows.length, 0);
   return (
-    <div className="max-wide:overflow-x-auto max-book:overflow-visible">
+    <div className="relative max-wide:overflow-x-auto max-book:overflow-visible">
       <table role="table" className="ledger">
         <caption className="sr-only">
           {`${count} ${count === 1 ? 'complex' : 'complexes'}: calculated on the left page, measured on the right page, link mark between`}

@@ -44,7 +44,7 @@ export function Quantity({
     notation,
     digits,
   );
-  const limit = bound === 'below' ? '<\u2009' : bound === 'above' ? '>\u2009' : '';
+  const limit = bound === 'below' ? '<\u00a0' : bound === 'above' ? '>\u00a0' : '';
   const inParentheses = text.uncertainty !== null && notation === 'parentheses';
   return (
     <span className={classNames('whitespace-nowrap', className)}>
@@ -54,17 +54,17 @@ export function Quantity({
         {inParentheses ? `(${text.uncertainty})` : null}
       </span>
       {text.uncertainty !== null && !inParentheses ? (
-        <span className="font-normal">{`\u2009±\u2009${text.uncertainty}`}</span>
+        <span className="font-normal">{`\u00a0±\u00a0${text.uncertainty}`}</span>
       ) : null}
       {powerOfTen === undefined ? null : (
         <>
-          {'\u2009×\u200910'}
+          {'\u00a0×\u00a010'}
           <sup>{String(powerOfTen).replace('-', '−')}</sup>
         </>
       )}
       {unit === undefined ? null : (
         <span className="font-normal">
-          {/^[°%′″]/.test(unit) && unit !== '%' ? '' : '\u2009'}
+          {/^[°%′″]/.test(unit) && unit !== '%' ? '' : '\u00a0'}
           <Unit of={unit} />
         </span>
       )}

@@ -18,7 +18,7 @@ const quantitiesAsUnits: Record<string, ReactNode> = {
 
 /**
  * A unit, typeset from plain text: "kJ mol-1", "cm3 mol-1", "muB" (Bohr magneton), "Eh" (hartree), "Angstrom".
- * Factors are parted by thin spaces, exponents raised with a true minus.
+ * Factors are parted by no-break spaces, exponents raised with a true minus.
  */
 export function Unit({ of }: { of: string }) {
   return (
@@ -28,7 +28,7 @@ export function Unit({ of }: { of: string }) {
         const [, symbol = factor, exponent] = /^(.*?[^\d-])(-?\d+)$/.exec(factor) ?? [];
         return (
           <Fragment key={index}>
-            {index > 0 ? '\u2009' : null}
+            {index > 0 ? '\u00a0' : null}
             {named ?? (symbol === 'Angstrom' ? 'Å' : symbol)}
             {exponent === undefined ? null : <sup>{exponent.replace('-', '−')}</sup>}
           </Fragment>

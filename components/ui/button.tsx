@@ -4,12 +4,12 @@ import { classNames } from './class-names';
 export type ButtonKind = 'main' | 'default' | 'quiet' | 'danger';
 
 const base =
-  'inline-flex min-h-[38px] items-center justify-center gap-2 rounded border px-4 py-2 text-[0.9375rem] leading-[1.2] font-semibold no-underline transition-colors duration-100 active:translate-y-px motion-reduce:transition-none';
+  'inline-flex items-center justify-center gap-2 rounded border py-2 text-[0.9375rem] leading-[1.2] transition-colors duration-100 active:translate-y-px motion-reduce:transition-none';
 
 const kinds: Record<ButtonKind, string> = {
-  main: 'border-ink bg-ink text-page hover:bg-ink-2',
-  default: 'border-ink bg-transparent text-ink hover:bg-page-sunk',
-  danger: 'border-dissent bg-transparent text-dissent hover:bg-dissent-tint',
+  main: 'px-4 font-semibold no-underline border-ink bg-ink text-page hover:bg-ink-2',
+  default: 'px-4 font-semibold no-underline border-ink bg-transparent text-ink hover:bg-page-sunk',
+  danger: 'px-4 font-semibold no-underline border-dissent bg-transparent text-dissent hover:bg-dissent-tint',
   quiet:
     'border-transparent px-1.5 font-normal text-ink underline decoration-rule-strong underline-offset-[3px] hover:decoration-current',
 };
@@ -19,7 +19,7 @@ const off =
 
 /** The look of a button, for links that do a button's work. */
 export function buttonClass(kind: ButtonKind = 'default', size: 'normal' | 'small' = 'normal'): string {
-  return classNames(base, kinds[kind], off, size === 'small' && 'min-h-[34px] px-3 py-1.5');
+  return classNames(base, kinds[kind], off, size === 'small' ? 'min-h-[34px]' : 'min-h-[38px]');
 }
 
 export interface ButtonProps extends ButtonHTMLAttributes<HTMLButtonElement> {

@@ -19,8 +19,8 @@ export function DataTable({
   return (
     // A frame that can scroll must be reachable by keyboard (WCAG 2.1.1).
     <div
-      className="overflow-x-auto"
-      role="region"
+      className="relative overflow-x-auto"
+      role="group"
       aria-label={typeof caption === 'string' ? caption : undefined}
       tabIndex={0}
     >

@@ -2,7 +2,7 @@
 export function SkeletonRows({ rows = 3, label = 'Loading' }: { rows?: number; label?: string }) {
   const widths = ['w-[86%]', 'w-[64%]', 'w-[74%]', 'w-[91%]', 'w-[58%]'];
   return (
-    <div role="status" aria-busy="true" className="grid gap-[9px] py-2">
+    <div role="status" aria-busy="true" className="grid content-start gap-[9px] py-2">
       <span className="sr-only">{label}</span>
       {Array.from({ length: rows }, (_, index) => (
         <span
