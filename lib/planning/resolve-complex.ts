@@ -1,4 +1,4 @@
-import { dElectronCount } from '../chemistry/electron-configuration';
+import { dBlockGroup, dElectronCount } from '../chemistry/electron-configuration';
 import { electronCount } from '../chemistry/electron-count';
 import { atomicNumber, elementSymbol } from '../chemistry/elements';
 import { hillFormula } from '../chemistry/formula';
@@ -71,7 +71,7 @@ export function resolveComplex(complex: Complex): Result<ResolvedComplex, Comple
       return problem('unknown element', `"${metal.element}" is no element`);
     const dElectrons = dElectronCount(element, metal.oxidationState);
     if (dElectrons === null) {
-      return dElectronCount(element, 3) === null && dElectronCount(element, 2) === null
+      return dBlockGroup(element) === null
         ? problem('no d block metal', `${element} has no d-electron count; the planner covers groups 3–12`)
         : problem(
             'impossible oxidation state',

@@ -158,7 +158,7 @@ describe('a complex is refused', () => {
   it.each<[string, ComplexInput]>([
     ['unknown element', { ...aqua('Xx') }],
     ['no d block metal', { ...aqua('Na', 1) }],
-    ['impossible oxidation state', { ...aqua('Zn', 3) }],
+    ['impossible oxidation state', aqua('Zn', 1)],
     ['charge does not add up', { ...aqua('Fe'), charge: 3 }],
     ['unknown ligand', { ...aqua('Fe'), ligands: [{ ligand: 'h2o2h', count: 6 }] }],
     [
