@@ -65,7 +65,7 @@ export const basisSets: Readonly<Record<string, BasisSet>> = {
   },
   'cc-pVDZ': {
     names: names('cc-pVDZ', 'cc-pVDZ', 'cc-pvdz', 'cc-pvdz'),
-    covers: (z) => z <= 18 || (z >= 31 && z <= 36),
+    covers: (z) => z <= 36 && z !== 19,
     potentialFrom: null,
     nwchemPotential: null,
     cartesian: false,
