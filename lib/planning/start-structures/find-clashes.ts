@@ -1,3 +1,4 @@
+import { isMetal } from '../../chemistry/elements';
 import type { BondedStructure } from './recipe';
 import { norm, subtract } from './vector';
 
@@ -10,8 +11,8 @@ export interface Clash {
 const roomAngstrom = 0.5;
 
 /**
- * Pairs of atoms that stand too close, nearest first. Bonded pairs and pairs with a common neighbour are
- * left out. The margin is a rule of thumb (H···H 1.1 Å, C···H 1.6 Å), meant to catch broken builds.
+ * Pairs of atoms that stand too close, nearest first. Bonded pairs and pairs with a common neighbour
+ * that is no metal are left out. The margin is a rule of thumb (H···H 1.1 Å, C···H 1.6 Å), meant to catch broken builds.
  * @param covalentRadiusAngstrom - per element; null when unknown (such atoms are not checked)
  */
 export function findClashes(
@@ -35,7 +36,11 @@ export function findClashes(
       const distanceAngstrom = norm(subtract(here, there));
       if (distanceAngstrom >= first + second + roomAngstrom) continue;
       const mine = neighbours[i] ?? new Set<number>();
-      if (mine.has(j) || [...mine].some((between) => neighbours[between]?.has(j))) continue;
+      if (
+        mine.has(j) ||
+        [...mine].some((between) => neighbours[between]?.has(j) && !isMetal(elements[between] ?? ''))
+      )
+        continue;
       clashes.push({ atoms: [j, i], distanceAngstrom });
     }
   });
