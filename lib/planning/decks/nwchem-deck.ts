@@ -26,7 +26,7 @@ export function nwchemDeck(request: DeckRequest): Result<Deck, DeckRefusal> {
   const elements = order.map((index) => structure.elements[index] ?? '');
   const positions = order.map((index) => structure.positionsAngstrom[index] ?? ([0, 0, 0] as const));
   const geometry = (from: number, to: number, name = '') => [
-    `geometry ${name}units angstroms noautosym nocenter noautoz`,
+    `geometry ${name}units angstroms noautosym nocenter`,
     ...coordinateLines(elements.slice(from, to), positions.slice(from, to)).map((line) => `  ${line}`),
     'end',
   ];
@@ -38,8 +38,7 @@ export function nwchemDeck(request: DeckRequest): Result<Deck, DeckRefusal> {
     // The directive counts per process.
     `memory total ${Math.max(200, Math.floor((request.memoryMb * 0.9) / request.cores))} mb`,
     `charge ${request.charge}`,
-    // Cartesian optimisation for three atoms or fewer and for odd spheres is slower but never breaks down.
-    ...(broken ? [] : geometry(0, elements.length).map((line) => line.replace(' noautoz', ''))),
+    ...(broken ? [] : geometry(0, elements.length)),
     ...basisLines(request),
     ...(method.relativity === 'ZORA' ? ['relativistic', '  zora on', 'end'] : []),
     ...(method.relativity === 'DKH2' ? ['relativistic', '  douglas-kroll dkh', 'end'] : []),

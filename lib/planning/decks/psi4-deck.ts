@@ -25,6 +25,8 @@ export function psi4Deck(request: DeckRequest): Result<Deck, DeckRefusal> {
   const suffix = { none: '', 'D3(0)': '-d3', 'D3(BJ)': '-d3bj', D4: '' }[method.dispersion];
   if (suffix !== '')
     notes.push('Psi4 calls the separate program dftd3 for this dispersion term; it must be installed.');
+  if (method.solvation)
+    notes.push("Psi4 needs to be built with PCMSolver for this; Debian's package is not.");
   const unrestricted = request.multiplicity > 1 || task === 'broken symmetry';
   const [spherical, radial] = gridPoints[method.grid];
   const call = `'${spelling.keyword}${suffix}', return_wfn=True`;
