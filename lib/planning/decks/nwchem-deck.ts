@@ -4,6 +4,7 @@ import { brokenSymmetryPlan, type BrokenSymmetryPlan } from './broken-symmetry';
 import { coordinateLines } from './coordinate-line';
 import type { Deck, DeckRefusal, DeckRequest } from './deck-request';
 import { functionalNames, isMetaGga } from './functional-names';
+import { isLinear } from './is-linear';
 import { solvents } from './solvents';
 import { titleLine } from './title-line';
 
@@ -25,8 +26,11 @@ export function nwchemDeck(request: DeckRequest): Result<Deck, DeckRefusal> {
     : structure.elements.map((_, index) => index);
   const elements = order.map((index) => structure.elements[index] ?? '');
   const positions = order.map((index) => structure.positionsAngstrom[index] ?? ([0, 0, 0] as const));
+  // Internal coordinates serve only an optimisation, and NWChem stops where it cannot build them: for a
+  // linear molecule among others.
+  const internal = task.startsWith('optimisation') && !isLinear(structure);
   const geometry = (from: number, to: number, name = '') => [
-    `geometry ${name}units angstroms noautosym nocenter`,
+    `geometry ${name}units angstroms noautosym nocenter${internal ? '' : ' noautoz'}`,
     ...coordinateLines(elements.slice(from, to), positions.slice(from, to)).map((line) => `  ${line}`),
     'end',
   ];

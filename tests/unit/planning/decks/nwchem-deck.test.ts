@@ -75,6 +75,29 @@ describe('an NWChem deck', () => {
     );
   });
 
+  it('leaves internal coordinates out where none are needed or none can be built', () => {
+    const geometryLine = (lines: string[]) => lines.find((line) => line.startsWith('geometry'));
+    const linear = {
+      structure: {
+        elements: ['Cu', 'Cl', 'Cl'],
+        positionsAngstrom: [
+          [0, 0, 0],
+          [1.2, 1.2, 1.2],
+          [-1.2, -1.2, -1.2],
+        ] as [number, number, number][],
+      },
+      charge: -1,
+      multiplicity: 1,
+      task: 'optimisation' as const,
+    };
+    // noautoz: Cartesian coordinates; NWChem ends with an error for a linear molecule otherwise.
+    expect(geometryLine(deckLines(request({ program: 'NWChem' }, linear)))).toMatch(/ noautoz$/);
+    expect(geometryLine(deckLines(request({ program: 'NWChem' })))).toMatch(/ noautoz$/);
+    expect(geometryLine(deckLines(request({ program: 'NWChem' }, { task: 'optimisation' })))).toMatch(
+      / nocenter$/,
+    );
+  });
+
   it('adds the core potential of a def2 set from rubidium on', () => {
     const text = deckLines(
       request(
