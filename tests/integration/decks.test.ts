@@ -194,6 +194,36 @@ describe.each(['NWChem', 'Psi4'] as const)('decks of %s', (program) => {
   });
 });
 
+describe('a fragment guess of NWChem', () => {
+  it.skipIf(!installed.NWChem)(
+    'puts ligand and sites in their places: H up, He closed, H down',
+    { timeout: 120_000 },
+    () => {
+      const output = run(
+        request('NWChem', 'broken symmetry', {
+          structure: {
+            elements: ['H', 'He', 'H'],
+            positionsAngstrom: position([0, 0, -1.6], [0, 0, 0], [0, 0, 1.6]),
+          },
+          sites: [
+            { atomIndex: 0, oxidationState: 0, unpaired: 1, spinUp: true },
+            { atomIndex: 2, oxidationState: 0, unpaired: 1, spinUp: false },
+          ],
+        }),
+      );
+      expect(s2('NWChem', output)).toBeCloseTo(1, 1);
+      // Last spin table: He first (atoms that are no site), then the sites in their order.
+      const table = output.slice(output.lastIndexOf('Spin Density - Mulliken'));
+      const spins = [...table.matchAll(/^\s+\d (?:He|H)\s+\d\s+(-?\d+\.\d+)/gm)]
+        .slice(0, 3)
+        .map((row) => Number(row[1]));
+      expect(spins[0]).toBeCloseTo(0, 1);
+      expect(spins[1]).toBeGreaterThan(0.9);
+      expect(spins[2]).toBeLessThan(-0.9);
+    },
+  );
+});
+
 describe('the two programs', () => {
   it.skipIf(!installed.NWChem || !installed.Psi4)(
     'agree on the energy of water to 0.1 millihartree beyond density fitting',
