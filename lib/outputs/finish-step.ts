@@ -28,6 +28,7 @@ export function finishStep(step: Step): Step {
   } else if (step.energyHartree !== null)
     warn(step, 'energy-without-geometry', lineOf(step, 'energyHartree'));
   checkPopulations(step);
+  checkFrequencies(step);
   checkElectrons(step);
   checkSpinSum(step);
   if (step.scf.converged === false) warn(step, 'scf-not-converged', lineOf(step, 'scf.converged'));
@@ -91,6 +92,22 @@ function checkPopulations(step: Step): void {
     delete step.evidence[path];
   }
   step.populations = step.populations.filter(fits);
+}
+
+/** A molecule of N atoms has 3N − 6 vibrations, 3N − 5 if it is linear; a list of another length is damaged. */
+function checkFrequencies(step: Step): void {
+  const atoms = step.geometry?.elements.length;
+  if (!step.frequencies || atoms === undefined) return;
+  const { count } = step.frequencies;
+  if (count === 3 * atoms - 6 || count === 3 * atoms - 5 || (atoms === 1 && count === 0)) return;
+  warn(
+    step,
+    'table-damaged',
+    lineOf(step, 'frequencies'),
+    `${count} frequencies cannot be all of ${atoms} atoms.`,
+  );
+  step.frequencies = null;
+  delete step.evidence.frequencies;
 }
 
 function checkSpinSum(step: Step): void {

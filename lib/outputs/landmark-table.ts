@@ -51,7 +51,8 @@ export class LandmarkTable {
     while (at < to && (bytes[at] === BLANK || bytes[at] === TAB)) at++;
     if (at >= to) return undefined;
     const second = at + 1 < to ? (bytes[at + 1] as number) : NEWLINE;
-    const candidates = this.byStart.get((bytes[at] as number) * 256 + second);
+    const key = (bytes[at] as number) * 256 + second;
+    const candidates = this.present[key] === 1 ? this.byStart.get(key) : undefined;
     if (!candidates) return undefined;
     for (const { pattern, landmark } of candidates) if (startsWith(bytes, at, to, pattern)) return landmark;
     return undefined;

@@ -9,6 +9,8 @@ export interface Line {
 export interface Section {
   /** Returns true to be given the next line too, false when this line was the section's last. */
   take(line: Line): boolean;
+  /** Takes lines as bytes [from, to) in place of `take`; they are valid during the call only. */
+  takeBytes?(bytes: Uint8Array, from: number, to: number): boolean;
   /** Landmarks are not looked for inside (echoed input); only `always` landmarks break it off. */
   exclusive?: boolean;
 }

@@ -1,3 +1,4 @@
+import { decodeLine } from './decode-line';
 import type { Landmark, Line, Section } from './landmark';
 import { LandmarkTable } from './landmark-table';
 
@@ -158,7 +159,11 @@ export class LineScanner {
     const found = shut || (unended && !landmark?.evenUnended) ? undefined : landmark;
     if (!found && (section === null || unended)) return;
     if (found?.glance && !found.glance(buffer, begin, stop, this.lines)) return;
-    const line = { text: decode(buffer, begin, stop), number: this.lines };
+    if (!found && section?.takeBytes) {
+      if (!section.takeBytes(buffer, begin, stop)) this.section = null;
+      return;
+    }
+    const line = { text: decodeLine(buffer, begin, stop), number: this.lines };
     if (found) this.section = found.read(line) ?? null;
     else if (section && !section.take(line)) this.section = null;
   }
@@ -196,21 +201,4 @@ function findNewline(bytes: Uint8Array, words: Int32Array, at: number): number {
 
 function startsWithByteOrderMark(bytes: Uint8Array): boolean {
   return bytes[0] === 0xef && bytes[1] === 0xbb && bytes[2] === 0xbf;
-}
-
-const utf8 = new TextDecoder('utf-8', { ignoreBOM: true });
-const latin1 = new TextDecoder('latin1');
-
-function decode(bytes: Uint8Array, from: number, to: number): string {
-  // A plain line is some times quicker this way than through a TextDecoder.
-  if (to - from <= 256 && isAscii(bytes, from, to))
-    return String.fromCharCode.apply(null, bytes.subarray(from, to) as Uint8Array & number[]);
-  const text = utf8.decode(bytes.subarray(from, to));
-  return text.includes('\uFFFD') ? latin1.decode(bytes.subarray(from, to)) : text;
-}
-
-function isAscii(bytes: Uint8Array, from: number, to: number): boolean {
-  let all = 0;
-  for (let i = from; i < to; i++) all |= bytes[i] as number;
-  return all < 0x80;
 }

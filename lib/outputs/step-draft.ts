@@ -1,4 +1,5 @@
 import { cite } from './cite';
+import type { KeptLines } from './kept-lines';
 import type { Line } from './landmark';
 import { emptyStep, type Geometry, type Program, type Step } from './record';
 import { warn } from './warnings';
@@ -51,16 +52,26 @@ export function isSameGeometry(a: Geometry, b: Geometry, toleranceAngstrom = 1e-
   );
 }
 
+/** Whether a geometry was printed for a point, be it read yet or not. */
+function hasGeometry(point: Point): boolean {
+  return point.geometry !== null || point.evidence.geometry !== undefined;
+}
+
 /**
  * A step while it is being read. What belongs to the job as a whole (charge, method, optimisation history,
- * frequencies, timings) goes into `step`; what belongs to one geometry (energy, spin, populations, orbitals,
- * dipole, frequencies, thermochemistry, stability) into `point`. A new geometry opens a new point, so that tables of an earlier geometry never stand
- * beside a later energy, and a last geometry that got no energy does not take the place of the one that has.
+ * timings) goes into `step`; what belongs to one geometry (energy, spin, populations, orbitals, dipole,
+ * frequencies, thermochemistry, stability) into `point`. A new geometry opens a new point, so that tables of an
+ * earlier geometry never stand beside a later energy, and a last geometry that got no energy does not take the
+ * place of the one that has.
  */
 export class StepDraft {
   readonly step: Step;
   point: Point = emptyPoint();
   private settled: Point | null = null;
+  private geometryTable: KeptLines | null = null;
+  /** Tables of a point that are read only if the point is the one that counts. */
+  private deferred = new Map<string, (point: Point) => void>();
+  private settledDeferred = new Map<string, (point: Point) => void>();
 
   constructor(program: Program) {
     this.step = emptyStep(program);
@@ -77,8 +88,35 @@ export class StepDraft {
    */
   nextPoint(): void {
     const { point, settled } = this;
-    if (point.energyHartree !== null && (point.geometry !== null || !settled?.geometry)) this.settled = point;
+    if (point.energyHartree !== null && (hasGeometry(point) || !settled || !hasGeometry(settled))) {
+      this.settled = point;
+      this.settledDeferred = this.deferred;
+    }
     this.point = emptyPoint();
+    this.deferred = new Map();
+  }
+
+  /**
+   * Puts the reading of a table off until it is known that the present point counts; a later one under the same
+   * name takes its place.
+   */
+  defer(name: string, read: (point: Point) => void): void {
+    this.deferred.set(name, read);
+  }
+
+  /**
+   * Takes a printed geometry as the lines of its table, to be read later; like `setGeometry` otherwise.
+   * @param read - gives the geometry, or null when the table is damaged
+   */
+  setGeometryLater(table: KeptLines, line: Line, read: (point: Point) => Geometry | null): void {
+    if (this.geometryTable && hasGeometry(this.point) && this.geometryTable.isSame(table)) return;
+    if (hasGeometry(this.point) || this.point.energyHartree !== null) this.nextPoint();
+    this.geometryTable = table;
+    cite(this.point, 'geometry', line);
+    this.defer('geometry', (point) => {
+      point.geometry = read(point);
+      if (!point.geometry) delete point.evidence.geometry;
+    });
   }
 
   /**
@@ -96,8 +134,10 @@ export class StepDraft {
   /** A new wavefunction at the same geometry: the tables of the one before are not its own. */
   sameGeometryAgain(): void {
     const { geometry, evidence } = this.point;
+    const later = this.deferred.get('geometry');
     this.nextPoint();
     this.point.geometry = geometry;
+    if (later) this.defer('geometry', later);
     if (evidence.geometry) this.point.evidence.geometry = evidence.geometry;
   }
 
@@ -105,9 +145,10 @@ export class StepDraft {
   finish(): Step {
     const { point, settled } = this;
     const useSettled =
-      settled !== null &&
-      (point.energyHartree === null || (point.geometry === null && settled.geometry !== null));
-    const { evidence, warnings, ...values } = useSettled ? settled : point;
+      settled !== null && (point.energyHartree === null || (!hasGeometry(point) && hasGeometry(settled)));
+    const chosen = useSettled ? settled : point;
+    for (const read of (useSettled ? this.settledDeferred : this.deferred).values()) read(chosen);
+    const { evidence, warnings, ...values } = chosen;
     const step: Step = {
       ...this.step,
       ...values,
@@ -116,7 +157,7 @@ export class StepDraft {
       evidence: { ...this.step.evidence, ...evidence },
       warnings: [...this.step.warnings, ...warnings],
     };
-    if (useSettled && point.geometry !== null)
+    if (useSettled && hasGeometry(point))
       warn(step, 'geometry-without-energy', point.evidence.geometry?.line);
     return step;
   }

@@ -97,7 +97,7 @@ function readOptimisationStep(line: Line, state: NwchemState): void {
   });
   history.energiesHartree.push(whole);
   history.steps = history.history.length;
-  cite(draft.step, `optimisation.energiesHartree.${history.steps - 1}`, line);
+  cite(draft.step, 'optimisation.energiesHartree', line);
 }
 
 export const energyLandmarks: LandmarkMap<NwchemState> = {

@@ -1,10 +1,12 @@
 import { elementOfTag } from '../element-of-tag';
+import { keepTable } from '../kept-lines';
 import type { Line, Section } from '../landmark';
 import { readInteger, readNumber, words } from '../numbers';
 import { addSpins, setPopulation } from '../population';
 import type { LandmarkMap } from '../program';
 import type { Population } from '../record';
 import { rowTable } from '../row-table';
+import type { Point } from '../step-draft';
 import { warn } from '../warnings';
 import type { NwchemState } from './state';
 
@@ -40,31 +42,43 @@ function netCharge({ nuclearCharge, value }: Row): number {
 /** How far net charges may miss the charge of the molecule by rounding alone, per atom. */
 const CHARGE_SUM_PER_ATOM = 0.006;
 
-function saveTotal(rows: Row[], scheme: Population['scheme'], state: NwchemState): void {
+type Save = (rows: Row[], scheme: Population['scheme'], point: Point, charge: number | null) => void;
+
+function saveTotal(...[rows, scheme, point, charge]: Parameters<Save>): void {
   const first = rows[0]?.line;
-  if (!state.current || !first) return;
-  const { point, step } = state.current;
+  if (!first) return;
   const atoms = rows.map((row) => ({ element: row.element, charge: netCharge(row), spin: null }));
   const sum = atoms.reduce((total, atom) => total + atom.charge, 0);
   // With core potentials the electrons of the core are missing: the difference is no net charge then.
-  const adds = step.charge === null || Math.abs(sum - step.charge) < 0.05 + CHARGE_SUM_PER_ATOM * rows.length;
+  const adds = charge === null || Math.abs(sum - charge) < 0.05 + CHARGE_SUM_PER_ATOM * rows.length;
   if (!isWhole(rows) || !adds) warn(point, 'table-damaged', first.number);
   else setPopulation(point, { scheme, atoms }, first);
 }
 
-function saveSpin(rows: Row[], scheme: Population['scheme'], state: NwchemState): void {
+function saveSpin(...[rows, scheme, point]: Parameters<Save>): void {
   const first = rows[0]?.line;
-  if (!state.current || !first) return;
+  if (!first) return;
   const spins = rows.map(({ element, value }) => ({ element, spin: readNumber(value) }));
-  const { point } = state.current;
   if (!isWhole(rows) || !addSpins(point, scheme, spins, first)) warn(point, 'table-damaged', first.number);
 }
 
 /** Tables before the energy are those of the guess and are passed over. */
-function table(save: typeof saveTotal, scheme: Population['scheme']) {
-  return (_: Line, state: NwchemState): Section | void => {
-    if (!state.afterEnergy) return;
-    return rowTable<Row>({ heading: 6, row: readRow, save: (rows) => save(rows, scheme, state) });
+function table(save: Save, scheme: Population['scheme']) {
+  return (heading: Line, state: NwchemState): Section | void => {
+    if (!state.afterEnergy || !state.current) return;
+    const draft = state.current;
+    // A rule, a blank line, two lines of headings, the rows, a blank line.
+    return keepTable(heading, 2, (kept) => {
+      draft.defer(`populations.${scheme}.${save.name}`, (point) =>
+        kept.replay(
+          rowTable<Row>({
+            heading: 6,
+            row: readRow,
+            save: (rows) => save(rows, scheme, point, draft.step.charge),
+          }),
+        ),
+      );
+    });
   };
 }
 

@@ -10,9 +10,7 @@ function endScf(converged: boolean) {
   return (line: Line, state: OrcaState) => {
     if (state.displaced) return;
     const draft = openStep(state);
-    const { point } = draft;
-    if (point.energyHartree !== null || point.populations.length > 0 || point.orbitals)
-      draft.sameGeometryAgain();
+    if (draft.point.scf.converged !== null) draft.sameGeometryAgain();
     startScf(state);
     state.scfRunning = null;
     draft.point.scf = { converged, iterations: integerAfter(line.text, 'AFTER') };
@@ -72,7 +70,7 @@ function readFinalEnergy(line: Line, state: OrcaState): void {
   });
   step.optimisation.energiesHartree.push(value);
   step.optimisation.steps = step.optimisation.history.length;
-  cite(step, `optimisation.energiesHartree.${step.optimisation.steps - 1}`, line);
+  cite(step, 'optimisation.energiesHartree', line);
 }
 
 /**

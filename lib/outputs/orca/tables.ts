@@ -2,12 +2,14 @@ import { elementSymbol } from '../../chemistry/elements';
 import { ATM_PA } from '../../chemistry/constants';
 import { cite } from '../cite';
 import { FrontierOrbitals } from '../frontier';
+import { keepTable, type KeptLines } from '../kept-lines';
 import type { Line, Section } from '../landmark';
 import { numberAfter, readInteger, readNumber, readNumbers, words } from '../numbers';
 import { setPopulation } from '../population';
 import type { LandmarkMap } from '../program';
-import type { Population, Step } from '../record';
+import type { Geometry, Population, Step } from '../record';
 import { rowTable } from '../row-table';
+import type { Point } from '../step-draft';
 import { vibrationsOf } from '../vibrations';
 import { warn } from '../warnings';
 import { addTask, openStep, type OrcaState } from './state';
@@ -26,26 +28,38 @@ function readAtom(line: Line): Atom | null {
   return position.length === 3 ? { element: elementSymbol(symbol), position } : null;
 }
 
+/** Reads a kept table of atoms; null when a number in it is none. */
+function toGeometry(table: KeptLines): Geometry | null {
+  const elements: string[] = [];
+  const positionsAngstrom: Geometry['positionsAngstrom'] = [];
+  let damaged = false;
+  table.replay(
+    rowTable<Atom>({
+      heading: 2,
+      row: readAtom,
+      save(rows) {
+        for (const { element, position } of rows) {
+          const [x, y, z] = position;
+          if (element === null) continue;
+          if (typeof x === 'number' && typeof y === 'number' && typeof z === 'number') {
+            elements.push(element);
+            positionsAngstrom.push([x, y, z]);
+          } else damaged = true;
+        }
+      },
+    }),
+  );
+  return damaged || elements.length === 0 ? null : { elements, positionsAngstrom };
+}
+
 function readGeometry(heading: Line, state: OrcaState): Section {
-  return rowTable<Atom>({
-    heading: 2,
-    row: readAtom,
-    save(rows) {
-      if (state.displaced) return;
-      const atoms = rows.filter(({ element }) => element !== null);
-      const draft = openStep(state);
-      const elements: string[] = [];
-      const positionsAngstrom: [number, number, number][] = [];
-      for (const { element, position } of atoms) {
-        const [x, y, z] = position;
-        if (element === null || typeof x !== 'number' || typeof y !== 'number' || typeof z !== 'number')
-          break;
-        elements.push(element);
-        positionsAngstrom.push([x, y, z]);
-      }
-      if (elements.length < atoms.length) warn(draft.step, 'table-damaged', heading.number);
-      else if (elements.length > 0) draft.setGeometry({ elements, positionsAngstrom }, heading);
-    },
+  return keepTable(heading, 1, (table) => {
+    if (state.displaced) return;
+    openStep(state).setGeometryLater(table, heading, (point) => {
+      const geometry = toGeometry(table);
+      if (!geometry) warn(point, 'table-damaged', heading.number);
+      return geometry;
+    });
   });
 }
 
@@ -75,30 +89,36 @@ function isSum(rows: PopulationRow[], closing: Line): boolean {
   return printed !== null && Math.abs(sum - printed) < 1e-5 + 1e-6 * rows.length;
 }
 
-function populations(scheme: Population['scheme']) {
-  return (_: Line, state: OrcaState): Section | void => {
+function populationTable(scheme: Population['scheme'], point: Point): Section {
+  return rowTable<PopulationRow>({
+    heading: 7,
+    row: readPopulation,
+    save(rows, closing) {
+      const first = rows[0]?.line;
+      const whole = rows.every(
+        ({ index, values }, i) => index === i && values.every((value) => value !== null),
+      );
+      if (!first) return;
+      if (!whole || !isSum(rows, closing)) {
+        warn(point, 'table-damaged', first.number);
+        return;
+      }
+      const atoms = rows.map(({ element, values }) => ({
+        element,
+        charge: values[0] ?? 0,
+        spin: values[1] ?? null,
+      }));
+      setPopulation(point, { scheme, atoms }, first);
+    },
+  });
+}
+
+/** @param blanks - how many blank lines stand above the table's end, that one included */
+function populations(scheme: Population['scheme'], blanks: number) {
+  return (heading: Line, state: OrcaState): Section | void => {
     if (state.displaced || state.otherDensity) return;
-    return rowTable<PopulationRow>({
-      heading: 7,
-      row: readPopulation,
-      save(rows, closing) {
-        const { point } = openStep(state);
-        const first = rows[0]?.line;
-        const whole = rows.every(
-          ({ index, values }, i) => index === i && values.every((value) => value !== null),
-        );
-        if (!first) return;
-        if (!whole || !isSum(rows, closing)) {
-          warn(point, 'table-damaged', first.number);
-          return;
-        }
-        const atoms = rows.map(({ element, values }) => ({
-          element,
-          charge: values[0] ?? 0,
-          spin: values[1] ?? null,
-        }));
-        setPopulation(point, { scheme, atoms }, first);
-      },
+    return keepTable(heading, blanks, (table) => {
+      openStep(state).defer(`populations.${scheme}`, (point) => table.replay(populationTable(scheme, point)));
     });
   };
 }
@@ -163,9 +183,8 @@ function readFrequencies(heading: Line, state: OrcaState): Section {
       addTask(state, 'frequencies');
       const { point } = openStep(state);
       const values = rows.map(({ value }) => value).filter((value) => value !== null);
-      const atoms = point.geometry?.elements.length;
       const inOrder = rows.every(({ index }, i) => index === i) && values.length === rows.length;
-      if (!inOrder || (atoms !== undefined && rows.length !== 3 * atoms)) {
+      if (!inOrder || rows.length % 3 !== 0) {
         warn(point, 'table-damaged', heading.number);
         return;
       }
@@ -199,9 +218,9 @@ function thermal(key: keyof Thermochemistry, factor = 1) {
 
 export const tableLandmarks: LandmarkMap<OrcaState> = {
   'CARTESIAN COORDINATES (ANGSTROEM)': readGeometry,
-  'MULLIKEN ATOMIC CHARGES': populations('Mulliken'),
-  'LOEWDIN ATOMIC CHARGES': populations('Löwdin'),
-  'HIRSHFELD ANALYSIS': populations('Hirshfeld'),
+  'MULLIKEN ATOMIC CHARGES': populations('Mulliken', 1),
+  'LOEWDIN ATOMIC CHARGES': populations('Löwdin', 1),
+  'HIRSHFELD ANALYSIS': populations('Hirshfeld', 3),
   'ORCA POPULATION ANALYSIS': (_, state) => {
     state.otherDensity = state.correlated !== null;
   },
