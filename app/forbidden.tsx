@@ -9,7 +9,7 @@ export default async function Forbidden() {
   const actor = await findActor();
   return (
     <main id="main" className="mx-auto w-full max-w-[620px] px-edge py-9">
-      <div className="bg-page px-leaf py-8">
+      <div className="border border-rule-strong bg-page px-leaf py-8">
         <h1 className="mb-4 text-title">Not allowed</h1>
         <p className="text-lead">
           {actor

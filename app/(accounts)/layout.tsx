@@ -14,7 +14,9 @@ export default function AccountsLayout({ children }: { children: ReactNode }) {
         id="main"
         className="mx-auto w-full max-w-[560px] px-edge py-9 max-book:max-w-none max-book:py-5 has-[[data-spread]]:max-w-[1080px]"
       >
-        <div className="bg-page px-9 py-9 max-book:px-5 max-book:py-7">{children}</div>
+        <div className="border border-rule-strong bg-page px-9 py-9 max-book:px-5 max-book:py-7">
+          {children}
+        </div>
       </main>
     </>
   );

@@ -3,11 +3,12 @@ import { currentGroups, requirePerson } from '@/app/_server/actor';
 import { signOut } from '@/app/_server/session-actions';
 import { SettingsTabs } from '@/components/accounts/settings-tabs';
 import { initialsOf } from '@/components/accounts/initials-of';
+import { Book } from '@/components/ledger/book';
 import { Masthead } from '@/components/masthead/masthead';
 
 const tabs = [
-  { name: 'Members', href: '/settings/members' },
-  { name: 'Your account', href: '/settings/account' },
+  { label: 'Members', href: '/settings/members' },
+  { label: 'Your account', href: '/settings/account' },
 ];
 
 export default async function SettingsLayout({ children }: { children: ReactNode }) {
@@ -29,12 +30,13 @@ export default async function SettingsLayout({ children }: { children: ReactNode
           </button>
         </form>
       </Masthead>
-      <div className="px-edge pt-4 pb-12">
-        <SettingsTabs tabs={group ? tabs : tabs.slice(1)} />
-        <main id="main" className="bg-page px-leaf py-8 max-book:px-4 max-book:py-6">
+      <SettingsTabs tabs={group ? tabs : tabs.slice(1)} />
+      <Book>
+        <main id="main" className="px-7 pt-7 pb-9 max-book:px-3.5 max-book:pt-5">
           {children}
         </main>
-      </div>
+      </Book>
+      <div className="h-12" />
     </>
   );
 }

@@ -2,7 +2,7 @@
 import { FormMessage } from './form-message';
 import { NewPasswordField } from './new-password-field';
 import { SubmitButton } from './submit-button';
-import { TextField } from './text-field';
+import { Field } from '@/components/ui/field';
 import { useFormAction, type FormAction } from './use-form-action';
 
 export function ChangePasswordForm({ action, email }: { action: FormAction; email: string }) {
@@ -16,15 +16,15 @@ export function ChangePasswordForm({ action, email }: { action: FormAction; emai
         <FormMessage state={state} />
         {/* Tells a password manager whose password this is. */}
         <input type="email" autoComplete="username" value={email} readOnly hidden />
-        <TextField
+        <Field
           label="Present password"
           name="presentPassword"
           type="password"
           autoComplete="current-password"
           required
-          problem={state.fieldMessages.presentPassword}
+          error={state.fieldMessages.presentPassword}
         />
-        <NewPasswordField label="New password" problem={state.fieldMessages.password} />
+        <NewPasswordField label="New password" error={state.fieldMessages.password} />
         <div>
           <SubmitButton pending="Changing …">Change the password</SubmitButton>
         </div>

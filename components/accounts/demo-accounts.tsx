@@ -1,3 +1,4 @@
+import { VisuallyHidden } from '@/components/ui/visually-hidden';
 import { SubmitButton } from './submit-button';
 
 interface DemoAccountsProps {
@@ -37,10 +38,10 @@ export function DemoAccounts({ accounts, action, to }: DemoAccountsProps) {
             <form action={action}>
               <input type="hidden" name="email" value={account.email} />
               <input type="hidden" name="to" value={to} />
-              <SubmitButton kind="plain" pending="Signing in …">
-                <span className="sr-only">Sign in as {account.name}, </span>
+              <SubmitButton kind="default" size="small" pending="Signing in …">
+                <VisuallyHidden>Sign in as {account.name}, </VisuallyHidden>
                 <span aria-hidden="true">Sign in</span>
-                <span className="sr-only">{account.role}</span>
+                <VisuallyHidden>{account.role}</VisuallyHidden>
               </SubmitButton>
             </form>
           </li>

@@ -1,3 +1,4 @@
+import { VisuallyHidden } from '@/components/ui/visually-hidden';
 import { SubmitButton } from './submit-button';
 
 interface GroupListProps {
@@ -32,8 +33,8 @@ export function GroupList({ groups, action }: GroupListProps) {
             ) : (
               <form action={action}>
                 <input type="hidden" name="group" value={group.groupId} />
-                <SubmitButton kind="plain">
-                  Work here<span className="sr-only">: {group.groupName}</span>
+                <SubmitButton kind="default" size="small">
+                  Work here<VisuallyHidden>: {group.groupName}</VisuallyHidden>
                 </SubmitButton>
               </form>
             )}

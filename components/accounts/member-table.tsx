@@ -1,8 +1,10 @@
 'use client';
+import { Select } from '@/components/ui/select';
+import { VisuallyHidden } from '@/components/ui/visually-hidden';
 import { FormMessage } from './form-message';
 import { LocalTime } from './local-time';
 import { RemoveMember } from './remove-member';
-import { RoleSelect } from './role-select';
+import { RoleOptions } from './role-options';
 import { SubmitButton } from './submit-button';
 import { useFormAction, type FormAction } from './use-form-action';
 
@@ -72,15 +74,18 @@ function RoleForm({
   return (
     <form action={submit} className="grid gap-2">
       <input type="hidden" name="userId" value={member.userId} />
-      <div className="flex gap-2">
-        <RoleSelect
+      <div className="grid grid-cols-[minmax(0,1fr)_max-content] items-end gap-2">
+        {/* The key lets the choice follow a role that was changed. */}
+        <Select
           key={member.role}
-          roles={roles}
+          label={<VisuallyHidden>Role of {member.name}</VisuallyHidden>}
+          name="role"
           defaultValue={member.role}
-          aria-label={`Role of ${member.name}`}
-        />
-        <SubmitButton kind="plain" pending="Changing …">
-          <span className="whitespace-nowrap">Change role</span>
+        >
+          <RoleOptions roles={roles} />
+        </Select>
+        <SubmitButton kind="default" pending="Changing …">
+          Change role
         </SubmitButton>
       </div>
       <FormMessage state={state} />

@@ -1,4 +1,5 @@
 'use client';
+import { VisuallyHidden } from '@/components/ui/visually-hidden';
 import { FormMessage } from './form-message';
 import { LocalTime } from './local-time';
 import { SubmitButton } from './submit-button';
@@ -48,14 +49,14 @@ export function OpenInvitations({ invitations, withdraw, sendAgain }: OpenInvita
             <div className="flex gap-2">
               <form action={submitAgain}>
                 <input type="hidden" name="invitationId" value={id} />
-                <SubmitButton kind="plain" pending="Sending …">
-                  Send again<span className="sr-only"> to {email}</span>
+                <SubmitButton kind="default" size="small" pending="Sending …">
+                  Send again<VisuallyHidden> to {email}</VisuallyHidden>
                 </SubmitButton>
               </form>
               <form action={submitWithdraw}>
                 <input type="hidden" name="invitationId" value={id} />
-                <SubmitButton kind="plain" pending="Withdrawing …">
-                  Withdraw<span className="sr-only"> the invitation of {email}</span>
+                <SubmitButton kind="default" size="small" pending="Withdrawing …">
+                  Withdraw<VisuallyHidden> the invitation of {email}</VisuallyHidden>
                 </SubmitButton>
               </form>
             </div>

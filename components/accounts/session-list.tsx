@@ -1,4 +1,5 @@
 'use client';
+import { VisuallyHidden } from '@/components/ui/visually-hidden';
 import { FormMessage } from './form-message';
 import { LocalTime } from './local-time';
 import { SubmitButton } from './submit-button';
@@ -46,8 +47,8 @@ export function SessionList({ sessions, endOne, endOthers }: SessionListProps) {
             {session.current ? null : (
               <form action={submitOne}>
                 <input type="hidden" name="sessionId" value={session.id} />
-                <SubmitButton kind="plain" pending="Ending …">
-                  End<span className="sr-only"> the session of {session.browser}</span>
+                <SubmitButton kind="default" size="small" pending="Ending …">
+                  End<VisuallyHidden> the session of {session.browser}</VisuallyHidden>
                 </SubmitButton>
               </form>
             )}
@@ -57,7 +58,7 @@ export function SessionList({ sessions, endOne, endOthers }: SessionListProps) {
       <p className="mt-3 text-small text-ink-2">A session ends by itself eight hours after signing in.</p>
       {sessions.length > 1 ? (
         <form action={submitOthers} className="mt-4">
-          <SubmitButton kind="plain" pending="Ending …">
+          <SubmitButton kind="default" size="small" pending="Ending …">
             End all others
           </SubmitButton>
         </form>

@@ -1,28 +1,9 @@
 'use client';
-import Link from 'next/link';
 import { usePathname } from 'next/navigation';
+import { IndexTabs } from '@/components/ledger/index-tabs';
 
-/** Index tabs on the top edge of the settings book. */
-export function SettingsTabs({ tabs }: { tabs: readonly { name: string; href: string }[] }) {
+/** Index tabs on the top edge of the settings. */
+export function SettingsTabs({ tabs }: { tabs: readonly { label: string; href: string }[] }) {
   const path = usePathname();
-  return (
-    <nav aria-label="Settings">
-      <ul className="flex gap-1 px-leaf max-book:px-2">
-        {tabs.map(({ name, href }) => {
-          const current = path === href;
-          return (
-            <li key={href}>
-              <Link
-                href={href}
-                aria-current={current ? 'page' : undefined}
-                className={`block border-t-2 px-4 py-2 no-underline ${current ? 'border-ink bg-page font-semibold' : 'border-transparent text-ink-2 hover:bg-page-sunk'}`}
-              >
-                {name}
-              </Link>
-            </li>
-          );
-        })}
-      </ul>
-    </nav>
-  );
+  return <IndexTabs label="Settings" tabs={tabs.map((tab) => ({ ...tab, current: tab.href === path }))} />;
 }

@@ -1,31 +1,22 @@
 'use client';
 import type { ReactNode } from 'react';
 import { useFormStatus } from 'react-dom';
+import { Button, type ButtonKind } from '@/components/ui/button';
 
 interface SubmitButtonProps {
   children: ReactNode;
   /** Said while the form is on its way. */
   pending?: string;
-  kind?: 'main' | 'plain';
+  kind?: ButtonKind;
+  size?: 'normal' | 'small';
 }
 
-/** Sends its form once: it is inert while the form is on its way. */
-export function SubmitButton({ children, pending = 'One moment …', kind = 'main' }: SubmitButtonProps) {
+/** Sends its form, once at a time. */
+export function SubmitButton({ children, pending = 'One moment …', kind = 'main', size }: SubmitButtonProps) {
   const status = useFormStatus();
-  const look =
-    kind === 'main'
-      ? 'border-ink bg-ink text-page hover:bg-ink-2'
-      : 'border-rule-strong bg-transparent text-ink hover:bg-page-sunk';
   return (
-    <button
-      type="submit"
-      aria-disabled={status.pending || undefined}
-      onClick={(event) => {
-        if (status.pending) event.preventDefault();
-      }}
-      className={`min-h-10 rounded border px-4 py-1.5 font-semibold ${look}`}
-    >
-      {status.pending ? pending : children}
-    </button>
+    <Button type="submit" kind={kind} size={size} busy={status.pending} className="whitespace-nowrap">
+      {status.pending ? pending : <span>{children}</span>}
+    </Button>
   );
 }

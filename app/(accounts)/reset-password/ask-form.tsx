@@ -1,7 +1,7 @@
 'use client';
 import { FormMessage } from '@/components/accounts/form-message';
 import { SubmitButton } from '@/components/accounts/submit-button';
-import { TextField } from '@/components/accounts/text-field';
+import { Field } from '@/components/ui/field';
 import { useFormAction, type FormAction } from '@/components/accounts/use-form-action';
 
 export function AskForm({ action }: { action: FormAction }) {
@@ -9,7 +9,7 @@ export function AskForm({ action }: { action: FormAction }) {
   return (
     <form action={submit} className="grid gap-5">
       <FormMessage state={state} />
-      <TextField
+      <Field
         label="E-mail"
         name="email"
         type="email"
@@ -17,7 +17,7 @@ export function AskForm({ action }: { action: FormAction }) {
         required
         maxLength={254}
         defaultValue={state.values.email}
-        problem={state.fieldMessages.email}
+        error={state.fieldMessages.email}
       />
       <div>
         <SubmitButton pending="Sending …">Send the link</SubmitButton>

@@ -1,7 +1,7 @@
 'use client';
 import { FormMessage } from '@/components/accounts/form-message';
 import { SubmitButton } from '@/components/accounts/submit-button';
-import { TextField } from '@/components/accounts/text-field';
+import { Field } from '@/components/ui/field';
 import { useFormAction, type FormAction } from '@/components/accounts/use-form-action';
 
 export function SignInForm({ action, to }: { action: FormAction; to: string }) {
@@ -10,7 +10,7 @@ export function SignInForm({ action, to }: { action: FormAction; to: string }) {
     <form action={submit} className="grid gap-5">
       <FormMessage state={state} />
       <input type="hidden" name="to" value={to} />
-      <TextField
+      <Field
         label="E-mail"
         name="email"
         type="email"
@@ -19,7 +19,7 @@ export function SignInForm({ action, to }: { action: FormAction; to: string }) {
         maxLength={254}
         defaultValue={state.values.email}
       />
-      <TextField label="Password" name="password" type="password" autoComplete="current-password" required />
+      <Field label="Password" name="password" type="password" autoComplete="current-password" required />
       <div>
         <SubmitButton pending="Signing in …">Sign in</SubmitButton>
       </div>

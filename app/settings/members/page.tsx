@@ -43,14 +43,7 @@ export default async function MembersPage() {
             changeRole={manages ? changeMemberRole : null}
             remove={manages ? removeFromGroup : null}
           />
-          <dl className="mt-5 grid gap-x-4 gap-y-1 text-small text-ink-2 book:grid-cols-[max-content_1fr]">
-            {roles.map((role) => (
-              <div key={role} className="contents max-book:block">
-                <dt className="font-semibold">{role}</dt>
-                <dd className="max-book:mb-2">{roleMeaning[role]}</dd>
-              </div>
-            ))}
-          </dl>
+          {manages ? <RoleMeanings /> : null}
         </div>
         {manages ? (
           <section aria-labelledby="invite">
@@ -70,7 +63,21 @@ export default async function MembersPage() {
             />
           </section>
         ) : null}
+        {manages ? null : <RoleMeanings />}
       </div>
     </>
+  );
+}
+
+function RoleMeanings() {
+  return (
+    <dl className="mt-5 grid gap-x-4 gap-y-1 text-small text-ink-2 book:grid-cols-[max-content_1fr]">
+      {roles.map((role) => (
+        <div key={role} className="contents max-book:block">
+          <dt className="font-semibold">{role}</dt>
+          <dd className="max-book:mb-2">{roleMeaning[role]}</dd>
+        </div>
+      ))}
+    </dl>
   );
 }

@@ -2,7 +2,7 @@
 import { FormMessage } from '@/components/accounts/form-message';
 import { NewPasswordField } from '@/components/accounts/new-password-field';
 import { SubmitButton } from '@/components/accounts/submit-button';
-import { TextField } from '@/components/accounts/text-field';
+import { Field } from '@/components/ui/field';
 import { useFormAction, type FormAction } from '@/components/accounts/use-form-action';
 
 export function FirstStartForm({ action }: { action: FormAction }) {
@@ -10,25 +10,25 @@ export function FirstStartForm({ action }: { action: FormAction }) {
   return (
     <form action={submit} className="grid gap-5">
       <FormMessage state={state} />
-      <TextField
+      <Field
         label="Name of the group"
         name="groupName"
         autoComplete="organization"
         required
         maxLength={120}
         defaultValue={state.values.groupName}
-        problem={state.fieldMessages.groupName}
+        error={state.fieldMessages.groupName}
       />
-      <TextField
+      <Field
         label="Your name"
         name="name"
         autoComplete="name"
         required
         maxLength={120}
         defaultValue={state.values.name}
-        problem={state.fieldMessages.name}
+        error={state.fieldMessages.name}
       />
-      <TextField
+      <Field
         label="E-mail"
         name="email"
         type="email"
@@ -36,9 +36,9 @@ export function FirstStartForm({ action }: { action: FormAction }) {
         required
         maxLength={254}
         defaultValue={state.values.email}
-        problem={state.fieldMessages.email}
+        error={state.fieldMessages.email}
       />
-      <NewPasswordField problem={state.fieldMessages.password} />
+      <NewPasswordField error={state.fieldMessages.password} />
       <div>
         <SubmitButton pending="Opening …">Open the group</SubmitButton>
       </div>

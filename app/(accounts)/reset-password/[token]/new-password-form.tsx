@@ -11,7 +11,7 @@ export function NewPasswordForm({ action, email }: { action: FormAction; email: 
       <FormMessage state={state} />
       {/* Tells a password manager whose password this is. */}
       <input type="email" autoComplete="username" value={email} readOnly hidden />
-      <NewPasswordField label="New password" problem={state.fieldMessages.password} />
+      <NewPasswordField label="New password" error={state.fieldMessages.password} />
       <div>
         <SubmitButton pending="Setting …">Set the password</SubmitButton>
       </div>
