@@ -1,5 +1,5 @@
 import { electronCount } from './electron-count';
-import { parseFormula } from './parse-formula';
+import { formulaElements } from './formula-elements';
 
 /** One ligand as bound: formula and charge of the free ligand in that form. */
 export interface Ligand {
@@ -23,6 +23,6 @@ export const denticity = (ligand: Ligand): number => ligand.donors.length;
  * @returns null when the formula cannot be read
  */
 export function ligandElectronCount(ligand: Ligand): number | null {
-  const elements = parseFormula(ligand.formula);
+  const elements = formulaElements(ligand.formula);
   return elements === null ? null : electronCount(elements, ligand.charge);
 }

@@ -4,7 +4,7 @@ import { atomicNumber, elementSymbol } from '../chemistry/elements';
 import { hillFormula } from '../chemistry/formula';
 import { ligandElectronCount, type Ligand } from '../chemistry/ligand';
 import { ligandDictionary } from '../chemistry/ligand-dictionary';
-import { parseFormula } from '../chemistry/parse-formula';
+import { formulaElements } from '../chemistry/formula-elements';
 import { err, ok, type Result } from '../result';
 import type { Complex } from './complex';
 
@@ -110,7 +110,7 @@ export function resolveComplex(complex: Complex): Result<ResolvedComplex, Comple
   const elements = [
     ...metals.map((metal) => metal.element),
     ...ligands.flatMap(({ ligand, count }) =>
-      Array.from({ length: count }, () => parseFormula(ligand.formula) ?? []).flat(),
+      Array.from({ length: count }, () => formulaElements(ligand.formula) ?? []).flat(),
     ),
   ];
   const electrons = electronCount(elements, complex.charge);

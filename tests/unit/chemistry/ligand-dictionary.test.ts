@@ -2,7 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { elementSymbol } from '@/lib/chemistry/elements';
 import { ligandElectronCount } from '@/lib/chemistry/ligand';
 import { ligandDictionary } from '@/lib/chemistry/ligand-dictionary';
-import { parseFormula } from '@/lib/chemistry/parse-formula';
+import { formulaElements } from '@/lib/chemistry/formula-elements';
 
 describe('the ligand dictionary', () => {
   it.each(Object.entries(ligandDictionary))('%s has electrons that fit its unpaired ones', (_key, ligand) => {
@@ -12,7 +12,7 @@ describe('the ligand dictionary', () => {
   });
 
   it.each(Object.entries(ligandDictionary))('%s has only donors that its formula holds', (_key, ligand) => {
-    const atoms = parseFormula(ligand.formula) ?? [];
+    const atoms = formulaElements(ligand.formula) ?? [];
     for (const donor of ligand.donors) {
       expect(elementSymbol(donor)).toBe(donor);
       const wanted = ligand.donors.filter((other) => other === donor).length;
@@ -31,13 +31,13 @@ describe('the ligand dictionary', () => {
 
 describe('parsing a formula', () => {
   it('reads brackets, hydrate dots and two-letter elements', () => {
-    expect(parseFormula('[Fe(H2O)6]')).toHaveLength(19);
-    expect(parseFormula('CuSO4·5H2O')).toHaveLength(21);
-    expect(parseFormula('CO')).toEqual(['C', 'O']);
-    expect(parseFormula('Co')).toEqual(['Co']);
+    expect(formulaElements('[Fe(H2O)6]')).toHaveLength(19);
+    expect(formulaElements('CuSO4·5H2O')).toHaveLength(21);
+    expect(formulaElements('CO')).toEqual(['C', 'O']);
+    expect(formulaElements('Co')).toEqual(['Co']);
   });
 
   it.each(['', 'Xy2', '(H2O', 'H2O)', '(H2O]2', 'fe', 'H-2', 'C999999999'])('refuses "%s"', (text) => {
-    expect(parseFormula(text)).toBeNull();
+    expect(formulaElements(text)).toBeNull();
   });
 });

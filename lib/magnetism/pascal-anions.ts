@@ -1,0 +1,50 @@
+import type { PascalRow } from './pascal-row';
+
+/**
+ * Anions: diamagnetic susceptibility in 10⁻⁶ cm³/mol (cgs-emu), per ion.
+ * Source: G. A. Bain and J. F. Berry, J. Chem. Educ. 2008, 85, 532, table 4, recalled; rows marked handbook agree with
+ * a reproduction that was read, rows marked soft were not seen again.
+ */
+export const pascalAnions: readonly PascalRow[] = [
+  ['AsO3^3-', -51, 'soft'],
+  ['AsO4^3-', -60, 'soft'],
+  ['BF4-', -37, 'soft'],
+  ['BO3^3-', -35, 'soft'],
+  ['Br-', -34.6, 'handbook'],
+  ['BrO3-', -40, 'soft'],
+  ['Cl-', -23.4, 'handbook'],
+  ['ClO3-', -30.2, 'handbook'],
+  ['ClO4-', -32, 'handbook'],
+  ['CN-', -13, 'handbook'],
+  ['C5H5-', -65, 'soft'],
+  ['C6H5COO-', -71, 'soft'],
+  ['CO3^2-', -28, 'soft'],
+  ['C2O4^2-', -34, 'soft'],
+  ['F-', -9.1, 'handbook'],
+  ['HCOO-', -17, 'soft'],
+  ['I-', -50.6, 'handbook'],
+  ['IO3-', -51, 'handbook'],
+  ['IO4-', -51.9, 'handbook'],
+  ['NO2-', -10, 'soft'],
+  ['NO3-', -18.9, 'handbook'],
+  ['NCO-', -23, 'soft'],
+  ['NCS-', -31, 'handbook'],
+  ['O^2-', -12, 'soft'],
+  ['CH3COO-', -31.5, 'soft'],
+  ['OH-', -12, 'handbook'],
+  ['PO3^3-', -42, 'soft'],
+  ['PtCl6^2-', -148, 'soft'],
+  ['S^2-', -30, 'soft'],
+  ['SO3^2-', -38, 'soft'],
+  ['SO4^2-', -40.1, 'handbook'],
+  ['S2O3^2-', -46, 'soft'],
+  ['S2O8^2-', -78, 'soft'],
+  ['HSO4-', -35, 'soft'],
+  ['Se^2-', -48, 'soft'],
+  ['SeO3^2-', -44, 'soft'],
+  ['SeO4^2-', -51, 'soft'],
+  ['SiO3^2-', -36, 'soft'],
+  ['Te^2-', -70, 'soft'],
+  ['TeO3^2-', -63, 'soft'],
+  ['TeO4^2-', -55, 'soft'],
+];
