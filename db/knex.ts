@@ -19,13 +19,11 @@ function camelKeys(row: unknown): unknown {
   return Object.fromEntries(Object.entries(row).map(([key, value]) => [toCamel(key), value]));
 }
 
+/** Results of raw SQL carry `rows` and keep the names they were written with. */
 function camelResult(result: unknown): unknown {
   if (Array.isArray(result)) return result.map(camelKeys);
-  if (result !== null && typeof result === 'object' && 'rows' in result && Array.isArray(result.rows)) {
-    result.rows = result.rows.map(camelKeys);
-    return result;
-  }
-  return camelKeys(result);
+  const raw = result !== null && typeof result === 'object' && 'rows' in result && 'command' in result;
+  return raw ? result : camelKeys(result);
 }
 
 /** The application's connection pool (role `spinstead_app`), opened on first use. */

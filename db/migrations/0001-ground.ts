@@ -105,7 +105,7 @@ export async function up(knex: Knex): Promise<void> {
       name text not null default '' check (length(name) <= 300),
       composition text not null check (length(composition) between 1 and 200),
       charge integer not null check (charge between -20 and 20),
-      metal text not null check (metal ~ '^[A-Z][a-z]?$'),
+      metal text not null check (metal ~ '^[A-Z][a-z]{0,1}$'),
       oxidation_state integer not null check (oxidation_state between -4 and 9),
       note text not null default '' check (length(note) <= 2000),
       created_at timestamptz not null default now(),

@@ -47,13 +47,13 @@ export async function endSession(db: Knex, sessionId: string): Promise<void> {
 /** The person's live sessions, the one used last first. */
 export async function listSessions(db: Knex, userId: string): Promise<Session[]> {
   const rows = await asPerson(db, userId, (trx) =>
-    trx<SessionRow>('sessions')
+    trx('sessions')
       .where({ user_id: userId, revoked_at: null })
       .where('expires_at', '>', trx.fn.now())
       .orderBy('seen_at', 'desc')
-      .select('id', 'user_agent', 'created_at', 'seen_at', 'expires_at'),
+      .select<Session[]>('id', 'userAgent', 'createdAt', 'seenAt', 'expiresAt'),
   );
-  return rows.map(toSession);
+  return rows;
 }
 
 /** Ends one of the person's own sessions; false when it is not theirs or already over. */
@@ -76,31 +76,9 @@ export function revokeOtherSessions(db: Knex, userId: string, keptSessionId: str
   );
 }
 
-interface SessionRow {
-  id: string;
-  user_id: string;
-  user_agent: string;
-  created_at: Date;
-  seen_at: Date;
-  expires_at: Date;
-  revoked_at: Date | null;
-}
-
 interface SessionPersonRow {
   user_id: string;
   name: string;
   email: string;
   demo: boolean;
-}
-
-function toSession(
-  row: Pick<SessionRow, 'id' | 'user_agent' | 'created_at' | 'seen_at' | 'expires_at'>,
-): Session {
-  return {
-    id: row.id,
-    userAgent: row.user_agent,
-    createdAt: row.created_at,
-    seenAt: row.seen_at,
-    expiresAt: row.expires_at,
-  };
 }

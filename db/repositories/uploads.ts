@@ -184,11 +184,11 @@ export async function listWaitingUploads(
   db: Knex,
   unchangedSeconds: number,
 ): Promise<{ groupId: string; uploadId: string }[]> {
-  const result = await db.raw<{ rows: { groupId: string; uploadId: string }[] }>(
-    'select group_id, upload_id from waiting_uploads(?)',
+  const { rows } = await db.raw<{ rows: { groupId: string; uploadId: string }[] }>(
+    'select group_id as "groupId", upload_id as "uploadId" from waiting_uploads(?)',
     [unchangedSeconds],
   );
-  return result.rows;
+  return rows;
 }
 
 /** Notes one received file of a drop: its bytes once per group, and the upload, queued or refused. */

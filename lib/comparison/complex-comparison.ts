@@ -8,6 +8,9 @@ import { momentVerdict, type Verdict } from './verdict';
 /** ⟨S²⟩ more than a tenth above S(S + 1) (at least 0.1 for singlets) is called contaminated. Common practice. */
 const CONTAMINATION_SHARE = 0.1;
 
+/** A candidate this far above the ground state is no rival: several times the usual error of a functional. Common practice. */
+const RIVAL_KJ_PER_MOL = 50;
+
 export interface ComparedRun extends LevelOfTheory {
   id: string;
   candidateId: string | null;
@@ -155,7 +158,13 @@ function agreementOf<R extends ComparedRun>(
       sentence: 'The measured interval only partly reaches the favoured candidate’s expected band.',
     };
   }
-  const rivals = rows.filter((row) => row !== favoured && row.run && row.verdict === 'consistent');
+  const rivals = rows.filter(
+    (row) =>
+      row !== favoured &&
+      row.verdict === 'consistent' &&
+      row.gapKJPerMol !== null &&
+      row.gapKJPerMol <= RIVAL_KJ_PER_MOL,
+  );
   if (rivals.length > 0) {
     return {
       agreement: 'dotted',
