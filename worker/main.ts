@@ -14,6 +14,7 @@ const RECONCILE_EVERY_MS = 5_000;
 const log = pino({ name: 'worker' });
 const context = { db: database(), storage: openStorage(), report: publishProgress };
 
+const connection = openRedis(redisUrl());
 const worker = new Worker(
   READ_QUEUE,
   async (job) => {
@@ -23,7 +24,7 @@ const worker = new Worker(
     log.info({ uploadId, milliseconds: Date.now() - started, attempt: job.attemptsMade + 1 }, 'upload read');
   },
   {
-    connection: openRedis(redisUrl()),
+    connection,
     concurrency: 2,
     // A killed worker's job is taken up again within seconds instead of a minute.
     lockDuration: 10_000,
@@ -60,6 +61,7 @@ async function stop(signal: string): Promise<void> {
   log.info({ signal }, 'finishing what is being read, then stopping');
   clearInterval(timer);
   await worker.close();
+  connection.disconnect();
   await Promise.all([closeReadQueue(), closeProgress(), closeDatabase()]);
   process.exit(0);
 }

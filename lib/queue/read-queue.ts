@@ -1,4 +1,5 @@
 import { Queue } from 'bullmq';
+import type { Redis } from 'ioredis';
 import { z } from 'zod';
 import { openRedis, redisUrl } from './connection';
 
@@ -8,11 +9,14 @@ export const READ_QUEUE = 'read-uploads';
 export const readJobSchema = z.object({ groupId: z.uuid(), uploadId: z.uuid() });
 export type ReadJob = z.infer<typeof readJobSchema>;
 
-let shared: Queue<ReadJob> | undefined;
+let shared: { queue: Queue<ReadJob>; connection: Redis } | undefined;
 
 function readQueue(): Queue<ReadJob> {
-  shared ??= new Queue<ReadJob>(READ_QUEUE, { connection: openRedis(redisUrl()) });
-  return shared;
+  if (!shared) {
+    const connection = openRedis(redisUrl());
+    shared = { connection, queue: new Queue<ReadJob>(READ_QUEUE, { connection }) };
+  }
+  return shared.queue;
 }
 
 /**
@@ -36,6 +40,8 @@ export async function enqueueReads(jobs: readonly ReadJob[]): Promise<void> {
 }
 
 export async function closeReadQueue(): Promise<void> {
-  await shared?.close();
+  await shared?.queue.close();
+  // A connection that was handed in is not the queue's to close.
+  shared?.connection.disconnect();
   shared = undefined;
 }
