@@ -1,4 +1,6 @@
-import type { Role } from './roles';
+import { z } from 'zod';
+import accounts from './demo-accounts.json';
+import { roleSchema, type Role } from './roles';
 
 export interface DemoAccount {
   name: string;
@@ -9,21 +11,9 @@ export interface DemoAccount {
 
 /**
  * The people of the invented group. Their passwords are no secret: the rows carry `demo`, and sign-in
- * refuses such rows outside demo mode. The seed creates them, the sign-in page and the launcher announce them.
+ * refuses such rows outside demo mode. The seed creates them, the sign-in page and the launcher announce them;
+ * the launcher reads the JSON file itself, for it runs before anything is built.
  */
-export const demoAccounts: readonly DemoAccount[] = [
-  { name: 'Hanne Oduya', email: 'hanne@fennick.example', role: 'PI', password: 'demo-hanne-2026' },
-  {
-    name: 'Ilse Brandvold',
-    email: 'ilse@fennick.example',
-    role: 'computational chemist',
-    password: 'demo-ilse-2026',
-  },
-  {
-    name: 'Tomas Quill',
-    email: 'tomas@fennick.example',
-    role: 'experimentalist',
-    password: 'demo-tomas-2026',
-  },
-  { name: 'Mirela Abt', email: 'mirela@fennick.example', role: 'guest', password: 'demo-mirela-2026' },
-];
+export const demoAccounts: readonly DemoAccount[] = z
+  .array(z.object({ name: z.string(), email: z.string(), role: roleSchema, password: z.string() }))
+  .parse(accounts);

@@ -21,6 +21,8 @@ export async function startPostgres({ folder, port, throwAway = false }) {
   const base = reachableFolder(folder);
   const data = path.join(base, 'data');
   const sockets = path.join(base, 'sockets');
+  // The way to the folders must be open to the user postgres; only the folders themselves are closed.
+  mkdirSync(base, { recursive: true, mode: 0o755 });
   for (const own of [data, sockets]) {
     mkdirSync(own, { recursive: true, mode: 0o700 });
     if (isRoot) giveToPostgres(own);
@@ -97,8 +99,6 @@ function reachableFolder(folder) {
 function giveToPostgres(folder) {
   const id = (/** @type {string} */ flag) => Number(execFileSync('id', [flag, USER]));
   if (statSync(folder).uid !== id('-u')) chownSync(folder, id('-u'), id('-g'));
-  const parent = path.dirname(folder);
-  if (!existsSync(parent)) mkdirSync(parent, { recursive: true, mode: 0o755 });
 }
 
 /**
