@@ -242,3 +242,17 @@ function runColumns({ readerVersion, record }: { readerVersion: string; record: 
     readAt: new Date(),
   };
 }
+
+/** The run of each of these files in the study, by SHA-256. */
+export async function listRunIdsByFile(
+  trx: Knex.Transaction,
+  tenant: Tenant,
+  studyId: string,
+  sha256s: readonly string[],
+): Promise<Map<string, string>> {
+  const rows = await trx('runs')
+    .where({ groupId: tenant.groupId, studyId })
+    .whereIn('sha256', sha256s)
+    .select<{ id: string; sha256: string }[]>('id', 'sha256');
+  return new Map(rows.map(({ sha256, id }) => [sha256, id]));
+}
