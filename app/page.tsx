@@ -1,4 +1,5 @@
 import type { Metadata } from 'next';
+import Link from 'next/link';
 import { requirePermission } from './_server/actor';
 import { readComparedStudy } from './_server/read-study';
 import { signOut } from './_server/session-actions';
@@ -21,9 +22,9 @@ export default async function HomePage() {
   const studies = await asTenant(database(), actor, (trx) => listStudies(trx, actor));
   const compared = await Promise.all(studies.map((study) => readComparedStudy(actor, study)));
   const newStudy = can(actor.role, 'manage studies') ? (
-    <a className={buttonClass('main')} href="/studies/new">
+    <Link className={buttonClass('main')} href="/studies/new">
       New study
-    </a>
+    </Link>
   ) : null;
   return (
     <>
