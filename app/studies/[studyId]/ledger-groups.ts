@@ -3,6 +3,7 @@ import type { LinkMarkKind } from '@/components/marks/link-mark';
 import type { StudyLedgerGroup, StudyLedgerRow } from '@/components/ledger/study-ledger-row';
 import { candidateWords } from '@/components/study/spin-and-shape';
 import { oxidationWords } from '@/components/study/oxidation-words';
+import type { Technique } from '@/db/repositories/measurements';
 import type { Agreement } from '@/lib/comparison/complex-comparison';
 import { groupBy } from '@/lib/group-by';
 import { COVERAGE_FACTOR } from '@/lib/comparison/measured-moment';
@@ -64,7 +65,7 @@ function ledgerRow(studyId: string, member: ComparedComplex): StudyLedgerRow {
     unmeasuredWord: measured ? undefined : 'not measured',
     unpaired: measured && { count: measured.unpaired, expandedU: COVERAGE_FACTOR * measured.uUnpaired },
     technique: measurements[0]
-      ? `${measurements[0].technique}, ${Math.round(measurements[0].temperatureK)} K`
+      ? `${techniqueWords[measurements[0].technique]}, ${Math.round(measurements[0].temperatureK)} K`
       : null,
     samplesWords: measured
       ? `${samples} ${samples === 1 ? 'sample' : 'samples'} · ${replicates} replicates`
@@ -78,3 +79,12 @@ function ledgerRow(studyId: string, member: ComparedComplex): StudyLedgerRow {
       : { state: 'open', words: 'no proposal' },
   };
 }
+
+/** Short enough for the ledger's narrow column. */
+const techniqueWords: Record<Technique, string> = {
+  'Gouy balance': 'Gouy',
+  'susceptibility balance': 'Balance',
+  'NMR shift': 'NMR shift',
+  magnetometer: 'Magnetometer',
+  'paper or another laboratory': 'Literature',
+};

@@ -10,7 +10,6 @@ import { Quantity } from '@/components/numbers/quantity';
 import { candidateWords } from '@/components/study/spin-and-shape';
 import { StatePanel } from '@/components/ui/state-panel';
 import { StructureViewer } from '@/components/viewer/structure-viewer';
-import { SphereTable } from '@/components/viewer/sphere-table';
 import type { Run } from '@/db/repositories/runs';
 import type { StoredStructure } from '@/db/repositories/structures';
 import type { CandidateComparison } from '@/lib/comparison/complex-comparison';
@@ -72,7 +71,6 @@ export function CalculatedLeaf({ studyId, detail }: { studyId: string; detail: C
         <>
           <LeafHead note={`last geometry of ${shown.title}`}>Centre</LeafHead>
           <StructureViewer structure={viewed(shown)} />
-          <SphereTable structure={viewed(shown)} />
         </>
       ) : null}
       {centre?.description.tau4 != null ? (

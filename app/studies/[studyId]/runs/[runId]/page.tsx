@@ -10,7 +10,6 @@ import { OutputExcerpt } from '@/components/ledger/output-excerpt';
 import { StudyFrame } from '@/components/study/study-frame';
 import { Notice } from '@/components/ui/notice';
 import { StructureViewer } from '@/components/viewer/structure-viewer';
-import { SphereTable } from '@/components/viewer/sphere-table';
 import { asTenant, database } from '@/db/knex';
 import { findRun } from '@/db/repositories/runs';
 import { findStructureOfRun } from '@/db/repositories/structures';
@@ -111,7 +110,6 @@ export default async function RunPage({
           <>
             <LeafHead note="last geometry with an energy">Structure</LeafHead>
             <StructureViewer structure={viewed} />
-            <SphereTable structure={viewed} />
           </>
         ) : null}
         <PopulationTables record={run.record} />
