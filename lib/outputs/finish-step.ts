@@ -89,7 +89,8 @@ function checkPopulations(step: Step): void {
       lineOf(step, path),
       `The ${population.scheme} table does not list the atoms.`,
     );
-    delete step.evidence[path];
+    for (const name of Object.keys(step.evidence))
+      if (name === path || name.startsWith(`${path}.`)) delete step.evidence[name];
   }
   step.populations = step.populations.filter(fits);
 }

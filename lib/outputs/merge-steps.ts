@@ -38,27 +38,33 @@ function isSameCalculation(a: Step, b: Step): boolean {
   );
 }
 
+/** The evidence of a value and of its parts. */
+function lendEvidence(from: Step, to: Step, value: string): void {
+  for (const [path, evidence] of Object.entries(from.evidence))
+    if (path === value || path.startsWith(`${value}.`)) to.evidence[path] ??= evidence;
+}
+
 function lend(from: Step, to: Step): void {
   const copy = <Key extends keyof Step>(key: Key) => {
     if (to[key] !== null || from[key] === null) return;
     to[key] = from[key];
-    for (const [path, evidence] of Object.entries(from.evidence))
-      if (path === key || path.startsWith(`${key}.`)) to.evidence[path] ??= evidence;
+    lendEvidence(from, to, key);
   };
   for (const key of lendable) copy(key);
   for (const population of from.populations) {
     if (to.populations.some(({ scheme }) => scheme === population.scheme)) continue;
     to.populations.push(population);
     const path = `populations.${population.scheme}`;
-    const evidence = from.evidence[path];
-    if (evidence) to.evidence[path] ??= evidence;
+    lendEvidence(from, to, path);
   }
   if (to.spin.s2 === null && from.spin.s2 !== null) {
     to.spin = from.spin;
-    for (const [path, evidence] of Object.entries(from.evidence))
-      if (path.startsWith('spin.')) to.evidence[path] ??= evidence;
+    lendEvidence(from, to, 'spin');
   }
-  if (to.scf.converged === null && from.scf.converged !== null) to.scf = from.scf;
+  if (to.scf.converged === null && from.scf.converged !== null) {
+    to.scf = from.scf;
+    lendEvidence(from, to, 'scf');
+  }
 }
 
 /**

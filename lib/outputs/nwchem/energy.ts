@@ -51,6 +51,7 @@ function readEnergy(line: Line, state: NwchemState): void {
     point.scf = { converged: true, iterations: state.iterations };
     cite(point, 'scf.converged', line);
   }
+  if (state.iterationLine) cite(point, 'scf.iterations', state.iterationLine);
 }
 
 /** A new SCF starts: what its guess prints is no result. */

@@ -52,14 +52,28 @@ function saveTotal(...[rows, scheme, point, charge]: Parameters<Save>): void {
   // With core potentials the electrons of the core are missing: the difference is no net charge then.
   const adds = charge === null || Math.abs(sum - charge) < 0.05 + CHARGE_SUM_PER_ATOM * rows.length;
   if (!isWhole(rows) || !adds) warn(point, 'table-damaged', first.number);
-  else setPopulation(point, { scheme, atoms }, first);
+  else
+    setPopulation(
+      point,
+      { scheme, atoms },
+      rows.map(({ line }) => line),
+    );
 }
 
 function saveSpin(...[rows, scheme, point]: Parameters<Save>): void {
   const first = rows[0]?.line;
   if (!first) return;
   const spins = rows.map(({ element, value }) => ({ element, spin: readNumber(value) }));
-  if (!isWhole(rows) || !addSpins(point, scheme, spins, first)) warn(point, 'table-damaged', first.number);
+  if (
+    !isWhole(rows) ||
+    !addSpins(
+      point,
+      scheme,
+      spins,
+      rows.map(({ line }) => line),
+    )
+  )
+    warn(point, 'table-damaged', first.number);
 }
 
 /** Tables before the energy are those of the guess and are passed over. */

@@ -15,6 +15,7 @@ function endScf(converged: boolean) {
     state.scfRunning = null;
     draft.point.scf = { converged, iterations: integerAfter(line.text, 'AFTER') };
     cite(draft.point, 'scf.converged', line);
+    cite(draft.point, 'scf.iterations', line);
   };
 }
 

@@ -108,7 +108,11 @@ function populationTable(scheme: Population['scheme'], point: Point): Section {
         charge: values[0] ?? 0,
         spin: values[1] ?? null,
       }));
-      setPopulation(point, { scheme, atoms }, first);
+      setPopulation(
+        point,
+        { scheme, atoms },
+        rows.map(({ line }) => line),
+      );
     },
   });
 }
