@@ -1,6 +1,6 @@
 'use client';
 import { QueryClient, QueryClientProvider, useQuery } from '@tanstack/react-query';
-import { useEffect, useRef, useState, type DragEvent } from 'react';
+import { useEffect, useEffectEvent, useRef, useState, type DragEvent } from 'react';
 import { Button } from '@/components/ui/button';
 import { classNames } from '@/components/ui/class-names';
 import { droppedFiles, type DroppedFile } from './dropped-files';
@@ -106,6 +106,11 @@ function DropZone({ onFiles }: { onFiles: (files: DroppedFile[]) => void }) {
     onFiles([...(input.files ?? [])].map((file) => ({ path: file.webkitRelativePath || file.name, file })));
     input.value = '';
   };
+  // Files chosen while the page was still waking up would wait for ever.
+  const takeWaiting = useEffectEvent(() => {
+    for (const input of [files.current, folder.current]) if (input?.files?.length) chosen(input);
+  });
+  useEffect(() => takeWaiting(), []);
   async function drop(event: DragEvent) {
     event.preventDefault();
     setOver(false);

@@ -78,17 +78,13 @@ async function streamThroughReader(
 }
 
 /** What a person should know of a file that was read: how it ended when it did not end well. */
-function findingOf(record: OutputRecord): UploadProblem | null {
-  if (record.outcome === 'finished') return null;
-  if (record.failure) {
-    return { code: record.outcome, message: record.failure.message, line: record.failure.line };
-  }
+function findingOf({ outcome, failure, lines }: OutputRecord): UploadProblem | null {
+  if (outcome === 'finished') return null;
+  const said = failure?.message ?? 'The program ended with an error.';
+  if (outcome === 'failed') return { code: outcome, message: said, line: failure?.line ?? null };
   return {
-    code: record.outcome,
-    message:
-      record.outcome === 'cut off'
-        ? `the output stops at line ${record.lines} without its closing line: the job was killed or the copy is not whole. Copy it again, or restart the job`
-        : 'the program ended with an error',
-    line: record.lines,
+    code: outcome,
+    message: `${said} It stops at line ${lines}: the job was killed, still runs, or the copy is not whole. Copy it again, or restart the job.`,
+    line: failure?.line ?? null,
   };
 }

@@ -60,7 +60,7 @@ function ledgerRow(studyId: string, member: ComparedComplex): StudyLedgerRow {
           : null,
     handbook: favoured?.band ?? null,
     mark: markKind(agreement),
-    markSentence: sentence,
+    markSentence: `${markKind(agreement)}: ${sentence}`,
     moment: measured && { mu: measured.muBohr, expandedU: COVERAGE_FACTOR * measured.uMuBohr },
     unmeasuredWord: measured ? undefined : 'not measured',
     unpaired: measured && { count: measured.unpaired, expandedU: COVERAGE_FACTOR * measured.uUnpaired },
