@@ -1,6 +1,7 @@
 import { nwchem } from './nwchem/nwchem';
 import { orca } from './orca/orca';
 import type { ProgramDefinition } from './program';
+import { psi4 } from './psi4/psi4';
 
 /** Every program that is read. A further one is added here. */
-export const programs: readonly ProgramDefinition[] = [orca, nwchem];
+export const programs: readonly ProgramDefinition[] = [orca, nwchem, psi4];

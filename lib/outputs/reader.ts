@@ -10,7 +10,7 @@ import { LineScanner } from './scanner';
 /**
  * Changes whenever the same bytes may give another record: records of an older version are read again.
  */
-export const READER_VERSION = '1.0.0';
+export const READER_VERSION = '1.1.0';
 
 export interface OutputReading {
   record: OutputRecord;
