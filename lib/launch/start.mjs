@@ -3,6 +3,7 @@ import { mkdirSync } from 'node:fs';
 import path from 'node:path';
 import { ensureBuild } from './build.mjs';
 import { keepRunning } from './keep-running.mjs';
+import { keepService } from './keep-service.mjs';
 import { lock } from './lock.mjs';
 import { ensureModules } from './modules.mjs';
 import { ensurePackages } from './packages.mjs';
@@ -25,13 +26,22 @@ async function main() {
   await ensurePackages({ withBrowser: false });
   await ensureModules();
   const [port, secret] = [await ports(folder), await secrets(folder)];
-  const postgres = await startPostgres({ folder: path.join(folder, 'services'), port: port.postgres });
-  stops.push(() => postgres.child.stop('SIGINT'));
-  const redis = await startRedis({ folder: path.join(folder, 'services'), port: port.redis });
-  stops.push(() => redis.child.stop('SIGTERM'));
+  const services = path.join(folder, 'services');
+  const postgres = await keepService(
+    'PostgreSQL',
+    () => startPostgres({ folder: services, port: port.postgres }),
+    'SIGINT',
+  );
+  stops.push(() => postgres.stop());
+  const redis = await keepService(
+    'Redis',
+    () => startRedis({ folder: services, port: port.redis }),
+    'SIGTERM',
+  );
+  stops.push(() => redis.stop());
   // Needs the node modules, which may have been missing when this file was loaded.
   const { prepareDatabase } = await import('./prepare-database.mjs');
-  const { ownerUrl, appUrl } = await prepareDatabase(postgres.superuserUrl, secret);
+  const { ownerUrl, appUrl } = await prepareDatabase(postgres.first.superuserUrl, secret);
   await ensureBuild();
 
   const url = `http://127.0.0.1:${port.web}`;
@@ -42,7 +52,7 @@ async function main() {
     NODE_ENV: 'production',
     NEXT_TELEMETRY_DISABLED: '1',
     DATABASE_URL: appUrl,
-    REDIS_URL: redis.url,
+    REDIS_URL: redis.first.url,
     NEXTAUTH_URL: process.env.NEXTAUTH_URL ?? url,
     NEXTAUTH_SECRET: secret.nextauth,
     STORAGE_DIR: path.join(folder, 'storage'),
