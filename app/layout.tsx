@@ -3,6 +3,7 @@ import { cookies } from 'next/headers';
 import type { ReactNode } from 'react';
 import { parseThemeChoice, themeClass, themeCookie } from '@/components/masthead/theme';
 import { SkipLink } from '@/components/ui/skip-link';
+import { isDemoMode } from '@/lib/access/demo-mode';
 import { colourTokens } from '@/tailwind.config';
 import './globals.css';
 
@@ -28,6 +29,11 @@ export default async function RootLayout({ children }: { children: ReactNode }) 
       <body>
         <SkipLink />
         {children}
+        {isDemoMode() ? (
+          <footer className="px-edge pb-6 text-note text-ink-2">
+            Demo mode: Fennick Label Works, its people, samples and every measured value are invented.
+          </footer>
+        ) : null}
       </body>
     </html>
   );
