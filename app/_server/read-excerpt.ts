@@ -2,6 +2,8 @@ import 'server-only';
 import { asTenant, database } from '@/db/knex';
 import { findFile } from '@/db/repositories/files';
 import type { Actor } from '@/lib/access/actor';
+import { err, ok, type Result } from '@/lib/result';
+import { ObjectMissing } from '@/lib/storage/object-storage';
 import { openStorage } from '@/lib/storage/open-storage';
 
 const LINES_AROUND = 6;
@@ -14,30 +16,37 @@ export interface Excerpt {
   lines: string[];
 }
 
+export type ExcerptProblem = 'no such line' | 'file missing';
+
 /**
  * The lines around one line of a stored output, read by range through the file's index of line offsets.
  * @param run - its SHA-256 names the stored file
  * @param line - 1-based
- * @returns null when the file has no such line or no index yet
+ * Errors: as a Result when the file has no such line, or when its bytes are gone from storage
  */
 export async function readExcerpt(
   actor: Actor,
   run: { sha256: string },
   line: number,
-): Promise<Excerpt | null> {
+): Promise<Result<Excerpt, ExcerptProblem>> {
   const file = await asTenant(database(), actor, (trx) => findFile(trx, actor, run.sha256));
   const index = file?.lineIndex;
-  if (!file || !index) return null;
+  if (!file || !index) return err('no such line');
   const firstLine = Math.max(1, line - LINES_AROUND);
   const block = Math.floor((firstLine - 1) / index.every);
   const start = index.offsets[block];
-  if (start === undefined) return null;
+  if (start === undefined) return err('no such line');
   const wanted = line + LINES_AROUND - block * index.every;
   const end = Math.min(index.offsets[block + 2] ?? file.bytes, start + MOST_BYTES, file.bytes) - 1;
   const chunks: Uint8Array[] = [];
-  for await (const chunk of await openStorage().get(run.sha256, { start, end })) chunks.push(chunk);
+  try {
+    for await (const chunk of await openStorage().get(run.sha256, { start, end })) chunks.push(chunk);
+  } catch (error) {
+    if (error instanceof ObjectMissing) return err('file missing');
+    throw error;
+  }
   const lines = new TextDecoder().decode(Buffer.concat(chunks)).split(/\r?\n/).slice(0, wanted);
   const skipped = firstLine - 1 - block * index.every;
   const shown = lines.slice(skipped).map((text) => text.slice(0, 300));
-  return shown.length > line - firstLine ? { line, firstLine, lines: shown } : null;
+  return shown.length > line - firstLine ? ok({ line, firstLine, lines: shown }) : err('no such line');
 }

@@ -2,7 +2,7 @@ import type { Metadata } from 'next';
 import { notFound } from 'next/navigation';
 import { z } from 'zod';
 import { requirePermission } from '@/app/_server/actor';
-import { readExcerpt } from '@/app/_server/read-excerpt';
+import { readExcerpt, type ExcerptProblem } from '@/app/_server/read-excerpt';
 import { requireStudy } from '@/app/_server/read-study';
 import { signOut } from '@/app/_server/session-actions';
 import { LeafHead } from '@/components/ledger/leaf-head';
@@ -95,14 +95,20 @@ export default async function RunPage({
         ) : null}
         {excerpt ? (
           <div id="excerpt" className="my-5">
-            <OutputExcerpt
-              file={run.fileName}
-              line={excerpt.line}
-              lineCount={run.record.lines}
-              firstLine={excerpt.firstLine}
-              lines={excerpt.lines}
-              sha256={run.sha256}
-            />
+            {excerpt.ok ? (
+              <OutputExcerpt
+                file={run.fileName}
+                line={excerpt.value.line}
+                lineCount={run.record.lines}
+                firstLine={excerpt.value.firstLine}
+                lines={excerpt.value.lines}
+                sha256={run.sha256}
+              />
+            ) : (
+              <Notice kind="error" title={excerptProblems[excerpt.error]}>
+                The record below stays as it was read.
+              </Notice>
+            )}
           </div>
         ) : null}
         <RecordGroups record={run.record} />
@@ -117,6 +123,12 @@ export default async function RunPage({
     </StudyFrame>
   );
 }
+
+const excerptProblems: Record<ExcerptProblem, string> = {
+  'no such line': 'The output has no such line',
+  'file missing':
+    'The raw file is missing from storage: upload it again, and tell whoever runs this installation',
+};
 
 function matchWords(matchedBy: string): string {
   return matchedBy === 'composition' ? 'matched by composition and charge' : `matched by ${matchedBy}`;

@@ -15,7 +15,10 @@ export async function GET(request: Request, { params }: RouteContext<'/api/v1/ru
     ? await asTenant(database(), actor, (trx) => findRun(trx, actor, runId))
     : undefined;
   if (!run) return failure(404, 'no such run', 'Your group has no run with this address.');
-  const bytes = await openStorage().get(run.sha256);
+  const storage = openStorage();
+  if (!(await storage.has(run.sha256)))
+    return failure(410, 'file missing', 'The raw file is missing from storage; upload it again.');
+  const bytes = await storage.get(run.sha256);
   const iterator = bytes[Symbol.asyncIterator]();
   const name = run.fileName.split('/').at(-1) ?? 'output';
   return new Response(
