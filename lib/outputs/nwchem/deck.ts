@@ -47,12 +47,12 @@ function readDeck(state: NwchemState): Section {
 /** The title: a line of text with a rule of its own length under it, and a blank line above. */
 function readTitle(state: NwchemState): Section {
   let lines = 0;
-  let above = '-';
+  let above = { text: '-', number: 0 };
   let before = '-';
   return {
     take(line) {
       const rule = line.text.trim();
-      const title = above.trim();
+      const title = above.text.trim();
       if (
         /^-+$/.test(rule) &&
         title !== '' &&
@@ -61,12 +61,12 @@ function readTitle(state: NwchemState): Section {
         !title.startsWith('Basis "') &&
         !/^\S{1,20} \([A-Z][a-z]{1,20}\)$/.test(title) // "Fe (Iron)" heads the basis of an element
       ) {
-        state.title = { text: title, line };
-        state.jobKey = keyIn(title, line, state.jobKey);
+        state.title = { text: title, line: above };
+        state.jobKey = keyIn(title, above, state.jobKey);
         return false;
       }
-      before = above;
-      above = line.text;
+      before = above.text;
+      above = { text: line.text, number: line.number };
       return ++lines < 60 && !rule.startsWith('Scaling coordinates');
     },
   };
