@@ -6,6 +6,8 @@ const nextConfig = {
   poweredByHeader: false,
   distDir: process.env.SPINSTEAD_DIST ?? '.next',
   outputFileTracingRoot: import.meta.dirname,
+  // forbidden() answers 403 with app/forbidden.tsx.
+  experimental: { authInterrupts: true },
   turbopack: { root: import.meta.dirname },
 };
 export default nextConfig;

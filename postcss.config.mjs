@@ -1,1 +1,2 @@
-export default { plugins: { '@tailwindcss/postcss': {} } };
+const postcssConfig = { plugins: { '@tailwindcss/postcss': {} } };
+export default postcssConfig;

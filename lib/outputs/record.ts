@@ -74,10 +74,41 @@ export const optimisationStepSchema = z.object({
   energyHartree: nullableNumber,
   largestGradientHartreePerBohr: nullableNumber,
   rmsGradientHartreePerBohr: nullableNumber,
+  /** Line of the energy of this geometry. */
   line: z.number(),
+  /** Line on which the geometry's table is announced, for playback from the raw file; null when not printed. */
+  geometryLine: nullableNumber,
 });
 
-export const warningSchema = z.object({ code: z.string(), message: z.string(), line: nullableNumber });
+/** What each code means stands in warnings.ts. */
+export const warningCodeSchema = z.enum([
+  'cut-off',
+  'failed',
+  'later-step-unfinished',
+  'scf-not-converged',
+  'scf-skipped',
+  'optimisation-not-converged',
+  'geometry-without-energy',
+  'energy-without-geometry',
+  'spin-multiplicity-parity',
+  'electron-count',
+  'spin-sum',
+  'atom-count',
+  'imaginary-modes',
+  'table-damaged',
+  'not-dft',
+  'energy-is-reference',
+  'beta-excess',
+  'unknown-program',
+  'steps-abridged',
+]);
+export type WarningCode = z.infer<typeof warningCodeSchema>;
+
+export const warningSchema = z.object({
+  code: warningCodeSchema,
+  message: z.string(),
+  line: nullableNumber,
+});
 export type Warning = z.infer<typeof warningSchema>;
 
 export const evidenceSchema = z.record(z.string(), z.object({ line: z.number(), text: z.string() }));
