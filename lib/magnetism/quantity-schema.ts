@@ -77,5 +77,7 @@ export function quantitySchema(rule: QuantityRule) {
       if (standardError === null) return { value: mean, u, degreesOfFreedom: null };
       return { value: mean, u: Math.hypot(standardError, u ?? 0), degreesOfFreedom };
     })
-    .meta({ description: `${rule.label}, ${rule.unit}, ${rule.range}: number | { value, u } | { replicates, u }` });
+    .meta({
+      description: `${rule.label}, ${rule.unit}, ${rule.range}: number | { value, u } | { replicates, u }`,
+    });
 }

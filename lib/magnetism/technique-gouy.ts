@@ -7,7 +7,11 @@ import { AIR_SOURCE, AIR_VOLUME_SUSCEPTIBILITY, type TechniquePlan } from './tec
 import type { StepDefinition } from './worked-step';
 
 const massChange = (label: string) =>
-  quantitySchema({ label: `apparent mass change of the ${label} (field on minus off)`, unit: 'mg', range: 'any' });
+  quantitySchema({
+    label: `apparent mass change of the ${label} (field on minus off)`,
+    unit: 'mg',
+    range: 'any',
+  });
 const mass = (label: string) =>
   quantitySchema({
     label: `mass of the ${label}`,
@@ -56,7 +60,11 @@ export const gouyReadingsSchema = z.discriminatedUnion(
     z.strictObject({
       calibration: z.literal('field and area'),
       ...common,
-      lengthCentimetre: quantitySchema({ label: 'filled length of the tube', unit: 'cm', range: 'above zero' }),
+      lengthCentimetre: quantitySchema({
+        label: 'filled length of the tube',
+        unit: 'cm',
+        range: 'above zero',
+      }),
       areaSquareCentimetre: quantitySchema({
         label: 'inner cross-section of the tube',
         unit: 'cm²',
@@ -116,9 +124,11 @@ const absoluteSteps: StepDefinition[] = [
     numbers: (at) =>
       `2·${STANDARD_GRAVITY_CM_PER_S2}·${showNumber(at('netChangeMg') * 1e-3)}/(${showNumber(at('areaCm2'))}·${showNumber(at('fieldOersted'))}²) + ${showNumber(at('kappaAir'))}`,
     unit: '',
-    source: 'F = ½(κ − κ_air)·A·H² (Nettleton & Sugden, Proc. R. Soc. A 1939), far end of the tube out of the field',
+    source:
+      'F = ½(κ − κ_air)·A·H² (Nettleton & Sugden, Proc. R. Soc. A 1939), far end of the tube out of the field',
     evaluate: (at) =>
-      (2 * STANDARD_GRAVITY_CM_PER_S2 * at('netChangeMg') * 1e-3) / (at('areaCm2') * at('fieldOersted') ** 2) +
+      (2 * STANDARD_GRAVITY_CM_PER_S2 * at('netChangeMg') * 1e-3) /
+        (at('areaCm2') * at('fieldOersted') ** 2) +
       at('kappaAir'),
   },
   {
@@ -142,7 +152,13 @@ export function gouyPlan(readings: GouyReadings): TechniquePlan {
   const inputs = [
     quantityInput('tubeChangeMg', 'Δw(tube)', 'mass change, tube', readings.tubeMassChangeMilligram, 'mg'),
     quantityInput('massGram', 'w', 'sample mass', readings.sampleMassGram, 'g'),
-    quantityInput('sampleChangeMg', 'Δw(sample)', 'mass change, sample', readings.sampleMassChangeMilligram, 'mg'),
+    quantityInput(
+      'sampleChangeMg',
+      'Δw(sample)',
+      'mass change, sample',
+      readings.sampleMassChangeMilligram,
+      'mg',
+    ),
     quantityInput('kappaAir', 'κ_air', 'air, per volume', exact(AIR_VOLUME_SUSCEPTIBILITY), '', AIR_SOURCE),
   ];
   const plan = (steps: StepDefinition[]): TechniquePlan => ({ inputs, steps, reaches: 'chiG', warnings: [] });
@@ -161,8 +177,20 @@ export function gouyPlan(readings: GouyReadings): TechniquePlan {
   }
   inputs.push(
     quantityInput('standardMassGram', 'w_std', 'calibrant mass', readings.standardMassGram, 'g'),
-    quantityInput('standardChangeMg', 'Δw(std)', 'mass change, calibrant', readings.standardMassChangeMilligram, 'mg'),
-    quantityInput('standardChiG', 'χ_std', 'calibrant susceptibility', readings.standardChiGCm3PerGram, 'cm³/g'),
+    quantityInput(
+      'standardChangeMg',
+      'Δw(std)',
+      'mass change, calibrant',
+      readings.standardMassChangeMilligram,
+      'mg',
+    ),
+    quantityInput(
+      'standardChiG',
+      'χ_std',
+      'calibrant susceptibility',
+      readings.standardChiGCm3PerGram,
+      'cm³/g',
+    ),
   );
   return plan([calibrationStep, forceStep, relativeStep]);
 }

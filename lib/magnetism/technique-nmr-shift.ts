@@ -7,7 +7,12 @@ import type { TechniquePlan } from './technique-plan';
 import type { At, StepDefinition } from './worked-step';
 
 const density = (label: string) =>
-  quantitySchema({ label: `density of the ${label}`, unit: 'g/cm³', range: 'above zero', most: 25 }).optional();
+  quantitySchema({
+    label: `density of the ${label}`,
+    unit: 'g/cm³',
+    range: 'above zero',
+    most: 25,
+  }).optional();
 
 /** NMR shift method with a coaxial insert: shift of a reference line between solution and pure solvent. */
 export const nmrReadingsSchema = z
@@ -68,7 +73,10 @@ export const nmrReadingsSchema = z
         'Enter the concentration once: mol/dm³, g/cm³, or molality with the density of the solution.',
       );
     if (readings.molalityMolePerKilogram && !readings.solutionDensityGramPerCubicCentimetre)
-      issue('solutionDensityGramPerCubicCentimetre', 'A molality needs the density of the solution in g/cm³.');
+      issue(
+        'solutionDensityGramPerCubicCentimetre',
+        'A molality needs the density of the solution in g/cm³.',
+      );
     if (readings.solvent !== undefined && readings.solventChiGCm3PerGram !== undefined)
       issue('solventChiGCm3PerGram', 'Give the solvent by name or by its susceptibility, not both.');
     if (readings.solvent !== undefined && !findSolventSusceptibility(readings.solvent))
@@ -173,7 +181,8 @@ export function nmrPlan(readings: NmrReadings, molarMass: boolean): TechniquePla
           unit: 'cm³/mol',
           source,
           evaluate: (at) =>
-            (3000 * at('shiftHertz')) / (divisor * Math.PI * at('spectrometerMhz') * 1e6 * at('concentration')),
+            (3000 * at('shiftHertz')) /
+            (divisor * Math.PI * at('spectrometerMhz') * 1e6 * at('concentration')),
         },
       ],
     };
@@ -199,7 +208,8 @@ export function nmrPlan(readings: NmrReadings, molarMass: boolean): TechniquePla
         source,
         evaluate: (at) => {
           const rhoB = at('massConcentration');
-          const paramagnetic = (3 * at('shiftHertz')) / (divisor * Math.PI * at('spectrometerMhz') * 1e6 * rhoB);
+          const paramagnetic =
+            (3 * at('shiftHertz')) / (divisor * Math.PI * at('spectrometerMhz') * 1e6 * rhoB);
           const solvent = hasSolvent ? at('solventChiG') : 0;
           const displaced = hasDensities
             ? (at('solventChiG') * (at('solventDensity') - at('solutionDensity'))) / rhoB
