@@ -31,7 +31,7 @@ export const usage = [
           parts: [
             { table: 'cations', name: 'Cu2+', count: 1 },
             { table: 'anions', name: 'SO4^2-', count: 1 },
-            { table: 'solvents', name: 'H2O', count: 5 },
+            { table: 'ligands', name: 'H2O', count: 5 },
           ],
         },
       },
