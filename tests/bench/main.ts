@@ -11,3 +11,5 @@ if (!load) {
   process.exit(1);
 }
 await (await load()).run();
+
+export {};
